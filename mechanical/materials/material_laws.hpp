@@ -3,6 +3,7 @@
 #include <memory>
 #include <string>
 
+#include "thermal/base/notice.hpp"
 #include "thermal/section/section.hpp"
 
 namespace ringward::mechanical {
@@ -14,10 +15,10 @@ struct StressAndTangent {
 
 /// Concrete at one temperature: compression positive, no tension.
 struct HotConcrete {
-  double f_c_Pa = 0;         ///< strength
-  double eps_c1 = 0;         ///< strain at the peak
-  double eps_cu1 = 0;        ///< strain at which the stress is zero again
-  double thermal_strain = 0; ///< free expansion from 20 C, elongation positive
+  double f_c_Pa = 0;          ///< strength
+  double eps_c1 = 0;          ///< strain at the peak
+  double eps_cu1 = 0;         ///< strain at which the stress is zero again
+  double thermal_strain = 0;  ///< free expansion from 20 C, elongation positive
 };
 
 /// Steel at one temperature, the same in tension and compression: linear, ellipse, plateau, and
@@ -66,5 +67,16 @@ using SteelLawPtr = std::shared_ptr<const SteelLaw>;
 [[nodiscard]] StressAndTangent concrete_stress(const HotConcrete& concrete, double eps);
 /// sigma(eps) of EN 1993-1-2 3.2.2 / EN 1992-1-2 3.2.3; odd in eps.
 [[nodiscard]] StressAndTangent steel_stress(const HotSteel& steel, double eps);
+
+/// A note when the strength lies within 5 MPa of 50 MPa, where the published law steps.
+/// @param strength_Pa cylinder strength, not divided by gamma
+/// @source en1992-1-2-2004 6.1
+[[nodiscard]] Notices concrete_strength_notices(double strength_Pa);
+/// A note when f_yk leaves 400..600 MPa.
+/// @source en1992-1-1-2004 3.2.2(3)
+[[nodiscard]] Notices bar_yield_notices(double yield_Pa);
+/// A note when f_y leaves the grades S235..S460.
+/// @source en1994-1-2-2005 1.1
+[[nodiscard]] Notices steel_yield_notices(double yield_Pa);
 
 }  // namespace ringward::mechanical

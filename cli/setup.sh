@@ -48,10 +48,21 @@ install_packages() {
     say "packages: all $# are installed"
     return 0
   fi
-  say "packages: installing with apt: ${missing[*]}"
-  local -a apt=(env DEBIAN_FRONTEND=noninteractive apt-get -qq -o DPkg::Lock::Timeout=300)
-  as_root "${apt[@]}" update >&2
-  as_root "${apt[@]}" install --yes --no-install-recommends "${missing[@]}" >&2
+  say "packages: installing with apt (a few minutes on a bare system): ${missing[*]}"
+  local log status=0
+  log="$(mktemp)"
+  run_apt "${missing[@]}" >"$log" 2>&1 || status=$?
+  if [[ "$status" -ne 0 ]]; then
+    cat -- "$log" >&2
+    say "apt failed; its messages are above"
+  fi
+  rm -f -- "$log"
+  return "$status"
+}
+
+run_apt() {
+  local -a apt=(env DEBIAN_FRONTEND=noninteractive apt-get -q -o DPkg::Lock::Timeout=300)
+  as_root "${apt[@]}" update && as_root "${apt[@]}" install --yes --no-install-recommends "$@"
 }
 
 # As many jobs as cores, but no more than memory allows (a compiler takes up to 1.5 GB).

@@ -1,5 +1,7 @@
 #pragma once
 
+#include <cmath>
+#include <limits>
 #include <memory>
 #include <string>
 #include <vector>
@@ -13,15 +15,23 @@ namespace ringward::fires {
 class FireCurve {
  public:
   virtual ~FireCurve() = default;
-  [[nodiscard]] virtual std::string name() const = 0;          ///< as in the input, e.g. "standard"
-  [[nodiscard]] virtual double gas_C(double t_s) const = 0;    ///< t_s >= 0
+  [[nodiscard]] virtual std::string name() const = 0;        ///< as in the input, e.g. "standard"
+  [[nodiscard]] virtual double gas_C(double t_s) const = 0;  ///< t_s >= 0
   [[nodiscard]] virtual std::vector<double> kinks_s() const { return {}; }
-  [[nodiscard]] virtual bool has_cooling() const { return false; }
+  /// The time after which the gas cools for the first time [s]; infinite when it never does.
+  [[nodiscard]] virtual double cooling_starts_s() const {
+    return std::numeric_limits<double>::infinity();
+  }
+  [[nodiscard]] bool has_cooling() const { return std::isfinite(cooling_starts_s()); }
   /// A fire of fire-resistance classes (R 30 ...): not parametric, table or constant.
   [[nodiscard]] virtual bool is_nominal() const { return true; }
-  [[nodiscard]] virtual double convection_W_m2K() const { return 25.0; }  ///< default of the surface
-  [[nodiscard]] virtual std::string source() const = 0;        ///< key in docs/sources.toml + clause
-  [[nodiscard]] virtual Notices notices() const { return {}; } ///< input outside the source's limits
+  [[nodiscard]] virtual double convection_W_m2K() const {
+    return 25.0;
+  }                                                      ///< default of the surface
+  [[nodiscard]] virtual std::string source() const = 0;  ///< key in docs/sources.toml + clause
+  [[nodiscard]] virtual Notices notices() const {
+    return {};
+  }  ///< input outside the source's limits
 };
 
 using FireCurvePtr = std::shared_ptr<const FireCurve>;

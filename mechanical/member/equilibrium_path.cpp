@@ -1,0 +1,191 @@
+#include "mechanical/member/equilibrium_path.hpp"
+
+#include <Eigen/LU>
+#include <algorithm>
+#include <cmath>
+
+#include "thermal/base/error.hpp"
+
+namespace ringward::mechanical {
+namespace {
+
+constexpr double kResidualTolerance = 1e-9;  // of the reference force
+constexpr int kNewtonLimit = 12;
+constexpr double kFirstStep = 0.05;
+constexpr double kLargestStep = 0.5;     // 0.05 % strain: far below the distance between two peaks
+constexpr double kSmallestStep = 1e-7;
+constexpr double kForceTolerance = 1e-8;
+constexpr double kCrushedStrain = 0.06;  // beyond eps_cu1 of any temperature
+constexpr int kWalkLimit = 4000;
+
+Error path_lost(const char* what) {
+  return {ErrorKind::solver_breakdown, std::string("equilibrium path of the member: ") + what};
+}
+
+}  // namespace
+
+std::optional<PathPoint> EquilibriumPath::project(const Eigen::VectorXd& guess,
+                                                  const Eigen::VectorXd& direction) const {
+  const Eigen::Index m = model_.equations();
+  Eigen::VectorXd q = guess;
+  double previous_norm = 0.0;
+  for (int iteration = 0; iteration < kNewtonLimit; ++iteration) {
+    const MemberModel::Linearised at = model_.linearise(q);
+    const double norm = at.residual.lpNorm<Eigen::Infinity>();
+    if (!std::isfinite(norm)) return std::nullopt;
+    if (iteration > 6 && norm > previous_norm) return std::nullopt;
+    previous_norm = norm;
+    Eigen::MatrixXd bordered(m + 1, m + 1);
+    bordered.topRows(m) = at.jacobian;
+    bordered.bottomRows(1) = direction.transpose();
+    const Eigen::PartialPivLU<Eigen::MatrixXd> lu(bordered);
+    if (norm < kResidualTolerance) {
+      Eigen::VectorXd along = lu.solve(Eigen::VectorXd::Unit(m + 1, m));
+      if (!along.allFinite() || along.norm() == 0.0) return std::nullopt;
+      along.normalize();
+      return PathPoint{q, along, at.pressure_Pa, at.hoop_Pa};
+    }
+    Eigen::VectorXd right = Eigen::VectorXd::Zero(m + 1);
+    right.head(m) = -at.residual;
+    const Eigen::VectorXd change = lu.solve(right);
+    if (!change.allFinite()) return std::nullopt;
+    q += change;
+  }
+  return std::nullopt;
+}
+
+std::optional<PathPoint> EquilibriumPath::start(double eps0) const {
+  const Eigen::VectorXd guess = model_.uniform_state(eps0);
+  const Eigen::VectorXd forward = model_.uniform_state(1.0).normalized();
+  return project(guess, forward);
+}
+
+PathPoint EquilibriumPath::advance(const PathPoint& from, double& step) const {
+  while (std::abs(step) > kSmallestStep) {
+    const std::optional<PathPoint> next = project(from.q + step * from.tangent, from.tangent);
+    // A turn of more than 60 degrees means that Newton found another branch.
+    if (next && next->tangent.dot(from.tangent) > 0.5) return *next;
+    step *= 0.5;
+  }
+  throw path_lost("no neighbouring equilibrium found");
+}
+
+std::optional<PathPoint> EquilibriumPath::at_force(const PathPoint& from, double scaled_N) const {
+  Eigen::VectorXd guess = from.q;
+  const double gap = scaled_N - from.scaled_N();
+  guess += from.tangent * (gap / from.N_slope());
+  guess(guess.size() - 1) = scaled_N;
+  std::optional<PathPoint> found = project(guess, Eigen::VectorXd::Unit(guess.size(), guess.size() - 1));
+  if (!found) return std::nullopt;
+  // `along` was normalised against the force axis: forward means rising force here.
+  if (found->tangent.dot(from.tangent) <= 0.0) return std::nullopt;
+  return found;
+}
+
+EquilibriumPath::Walk EquilibriumPath::walk_to_force(const PathPoint& from, double scaled_N) const {
+  PathPoint current = from;
+  double step = kFirstStep;
+  const double sign = from.scaled_N() < scaled_N ? 1.0 : -1.0;
+  for (int count = 0; count < kWalkLimit; ++count) {
+    const double gap = scaled_N - current.scaled_N();
+    if (std::abs(gap) < kForceTolerance) return {End::at_force, current};
+    if (sign > 0.0 && current.N_slope() <= 0.0) return {End::at_maximum, current};
+    const double to_target = current.N_slope() > 0.0 ? std::abs(gap / current.N_slope()) : step;
+    if (current.N_slope() > 0.0 && to_target <= 2.0 * step) {
+      const std::optional<PathPoint> there = at_force(current, scaled_N);
+      if (there && there->N_slope() > 0.0) {
+        const double moved = (there->q - current.q).norm();
+        if (moved < 4.0 * to_target + 1e-6) return {End::at_force, *there};
+      }
+    }
+    double signed_step = sign * std::min(step, std::max(to_target, 1e-4));
+    const PathPoint next = advance(current, signed_step);
+    const bool passed = sign * (scaled_N - next.scaled_N()) < 0.0;
+    if (sign > 0.0 && !passed && next.N_slope() <= 0.0) {
+      PathPoint top = refine_maximum(current, signed_step);
+      if (top.scaled_N() < scaled_N) return {End::at_maximum, top};
+      step = 0.5 * std::abs(signed_step);
+      continue;
+    }
+    if (passed) {
+      // Close in from the near side: the step over the target was too long for Newton at the force.
+      step = 0.5 * std::abs(signed_step);
+      if (step < kSmallestStep) return {End::at_force, next};
+      continue;
+    }
+    current = next;
+    step = std::min(kLargestStep, 1.6 * std::abs(signed_step));
+  }
+  throw path_lost("the applied force is not reached");
+}
+
+// The slope of N along the path falls through zero between `before` and `before` + step.
+PathPoint EquilibriumPath::refine_maximum(const PathPoint& before, double step) const {
+  PathPoint best = before;
+  double low = 0.0;
+  double high = step;
+  double low_slope = before.N_slope();
+  double high_slope = 0.0;
+  for (int iteration = 0; iteration < 60; ++iteration) {
+    double at = 0.5 * (low + high);
+    if (iteration > 0 && iteration % 3 != 0 && high_slope < 0.0) {
+      at = low + (high - low) * low_slope / (low_slope - high_slope);
+      at = std::clamp(at, low + 0.02 * (high - low), high - 0.02 * (high - low));
+    }
+    const std::optional<PathPoint> point = project(before.q + at * before.tangent, before.tangent);
+    if (!point) throw path_lost("no equilibrium next to a maximum");
+    if (point->scaled_N() > best.scaled_N()) best = *point;
+    (point->N_slope() > 0.0 ? low : high) = at;
+    (point->N_slope() > 0.0 ? low_slope : high_slope) = point->N_slope();
+    // The force is within slope x width of the maximum.
+    const double remaining = (high - low) * std::max(low_slope, -high_slope);
+    if (high_slope < 0.0 && remaining < kForceTolerance) break;
+  }
+  return best;
+}
+
+PathPoint EquilibriumPath::walk_to_maximum(const PathPoint& from) const {
+  PathPoint current = from;
+  double step = kFirstStep;
+  for (int count = 0; count < kWalkLimit; ++count) {
+    if (current.N_slope() <= 0.0) return current;
+    const PathPoint next = advance(current, step);
+    if (next.N_slope() <= 0.0) return refine_maximum(current, step);
+    if (next.scaled_N() < current.scaled_N()) {  // a maximum and a minimum inside one step
+      step *= 0.5;
+      continue;
+    }
+    current = next;
+    step = std::min(kLargestStep, 1.6 * step);
+  }
+  throw path_lost("no maximum of the force found");
+}
+
+double EquilibriumPath::largest_force(const PathPoint& from) const {
+  PathPoint current = from;
+  double step = kFirstStep;
+  double largest = from.scaled_N();
+  for (int count = 0; count < kWalkLimit; ++count) {
+    const StrainPlane plane = model_.plane(current.q, 0);
+    const double bending =
+        std::hypot(plane.kappa_u_1_m, plane.kappa_v_1_m) * model_.section().extent_m();
+    const bool crushed = plane.eps0 > kCrushedStrain || bending > 2.0 * kCrushedStrain;
+    if (crushed || current.scaled_N() < 0.05 * largest) break;
+    double tried = step;
+    PathPoint next;
+    try {
+      next = advance(current, tried);
+    } catch (const Error&) {
+      break;  // the tail of the path: what was found so far stands
+    }
+    if (current.N_slope() > 0.0 && next.N_slope() <= 0.0) {
+      largest = std::max(largest, refine_maximum(current, tried).scaled_N());
+    }
+    largest = std::max(largest, next.scaled_N());
+    current = next;
+    step = std::min(kLargestStep, 1.6 * tried);
+  }
+  return largest;
+}
+
+}  // namespace ringward::mechanical

@@ -1,0 +1,92 @@
+#include "mechanical/rating/standing_column.hpp"
+
+#include "mechanical/confinement/slip.hpp"
+
+namespace ringward::mechanical {
+namespace {
+
+double mid_height_hoop(const thermal::Section& section) {
+  if (!section.tube) return 0.0;
+  return tube_profile(section.tube->friction, section.core_width_m(), section.tube->clear_height_m)
+      .mid_height_hoop;
+}
+
+/// Constant end moments are reached through the eccentricity that gives them at the applied load.
+MemberLoading as_eccentricity(const MemberLoading& loading, double load_N) {
+  MemberLoading result = loading;
+  result.eccentricity_u_m += loading.moment_u_Nm / load_N;
+  result.eccentricity_v_m += loading.moment_v_Nm / load_N;
+  result.moment_u_Nm = 0.0;
+  result.moment_v_Nm = 0.0;
+  return result;
+}
+
+constexpr double kStartStrain = 1e-5;
+
+}  // namespace
+
+void StandingColumn::build(const HotMaterials& hot) {
+  const ConfinementModel model = gap_closed_ ? ConfinementModel::none : fixed_->model;
+  const TubeGrip grip = tube_grip(fixed_->column, model, fixed_->bending.layout, hot,
+                                  mid_height_hoop(fixed_->column.section));
+  section_ = std::make_shared<HotSection>(fixed_->bending.layout, hot, grip,
+                                          fixed_->materials.cold_concrete_Pa());
+  model_ = std::make_shared<MemberModel>(*section_, fixed_->shape, fixed_->bending.loading,
+                                         section_->plastic_N());
+  time_s_ = hot.time_s;
+  tube_strain_ = hot.tube_reported_strain;
+}
+
+Standing StandingColumn::settle(const PathPoint& from) {
+  const EquilibriumPath path(*model_);
+  const EquilibriumPath::Walk walk = path.walk_to_force(from, model_->scaled_N(fixed_->load_N));
+  stance_.point = walk.point;
+  stance_.mid_height = model_->plane(walk.point.q, 0);
+  if (fixed_->column.section.tube) {
+    const double elongation = -stance_.mid_height.eps0;
+    stance_.gap_closure_m =
+        fixed_->column.section.tube->clear_height_m * (tube_strain_ - elongation);
+  }
+  return walk.end == EquilibriumPath::End::at_force ? Standing::stands : Standing::falls;
+}
+
+Standing StandingColumn::load_cold(const HotMaterials& cold) {
+  build(cold);
+  const MemberLoading proportional = as_eccentricity(fixed_->bending.loading, fixed_->load_N);
+  const MemberModel loading_up(*section_, fixed_->shape, proportional, section_->plastic_N());
+  const EquilibriumPath path(loading_up);
+  std::optional<PathPoint> start = path.start(kStartStrain);
+  if (!start) return Standing::lost;
+  const double target = loading_up.scaled_N(fixed_->load_N);
+  const EquilibriumPath::Walk walk = path.walk_to_force(*start, target);
+  stance_.point = walk.point;
+  if (walk.end == EquilibriumPath::End::at_maximum) return Standing::falls;
+  const EquilibriumPath constant_moment(*model_);
+  const std::optional<PathPoint> there = constant_moment.project(walk.point.q, walk.point.tangent);
+  if (!there) return Standing::lost;
+  return settle(*there);
+}
+
+Standing StandingColumn::move_to(const HotMaterials& hot) {
+  build(hot);
+  // Forces are scaled by the plastic resistance, which changes with time.
+  Eigen::VectorXd guess = stance_.point.q;
+  guess(guess.size() - 1) = model_->scaled_N(fixed_->load_N);
+  const EquilibriumPath path(*model_);
+  const std::optional<PathPoint> near = path.project(guess, stance_.point.tangent);
+  if (!near) return Standing::lost;
+  return settle(*near);
+}
+
+PathPoint StandingColumn::limit() const {
+  return EquilibriumPath(*model_).walk_to_maximum(stance_.point);
+}
+
+double StandingColumn::reserve_N() const {
+  const EquilibriumPath path(*model_);
+  return path.largest_force(stance_.point) * section_->plastic_N();
+}
+
+double StandingColumn::force_N(const PathPoint& point) const { return model_->axial_N(point.q); }
+
+}  // namespace ringward::mechanical

@@ -43,6 +43,7 @@ struct SingleRating {
   std::vector<HistoryRow> history;
   std::vector<TubeEvent> events;
   double cold_capacity_N = 0;
+  double reserve_N = 0;  ///< at the fall: largest force over all strains, never the rating
 };
 
 struct Bounds {

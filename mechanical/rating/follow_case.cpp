@@ -1,0 +1,217 @@
+#include <algorithm>
+#include <cmath>
+
+#include "mechanical/rating/single_rating.hpp"
+#include "thermal/base/error.hpp"
+#include "thermal/base/units.hpp"
+
+namespace ringward::mechanical {
+namespace {
+
+/// One case on its way through the fire.
+class CaseFollower {
+ public:
+  CaseFollower(const StandingCase& fixed, MaterialsInTime& in_time)
+      : fixed_(fixed), in_time_(in_time), standing_(fixed) {}
+
+  CaseHistory run(const std::vector<double>& sample_s, double until_s) {
+    if (!load()) return std::move(history_);
+    for (const double t_s : sample_s) {
+      if (t_s > until_s) break;
+      if (!go_to(t_s)) break;
+      add_sample();
+      if (dips_between_samples() && !recheck_dip()) break;
+    }
+    return std::move(history_);
+  }
+
+  std::optional<StandingColumn> run_to(double t_s, CaseHistory& history) {
+    sampling_ = false;
+    bool stands = load();
+    for (const double to_s : search_times(in_time_.materials().history())) {
+      if (stands) stands = go_to(std::min(to_s, t_s));
+    }
+    history = std::move(history_);
+    if (!stands) return std::nullopt;
+    return standing_;
+  }
+
+ private:
+  /// Loads the cold column. False when it cannot carry the load.
+  bool load() {
+    const Standing cold = standing_.load_cold(*in_time_.at(0.0));
+    if (cold == Standing::lost) throw lost_at(0.0);
+    if (cold == Standing::stands) return true;
+    history_.fall_s = 0.0;
+    if (sampling_) add_overloaded();
+    return false;
+  }
+
+  [[nodiscard]] Error lost_at(double t_s) const {
+    return {ErrorKind::solver_breakdown,
+            "the equilibrium of the member could not be computed at " +
+                std::to_string(units::min_from_s(t_s)) + " min"};
+  }
+
+  [[nodiscard]] bool in_contact(const StandingColumn& column) const {
+    return column.stance().point.pressure_Pa > 0.0;
+  }
+
+  [[nodiscard]] bool closes_gap(const StandingColumn& column) const {
+    if (fixed_.model != ConfinementModel::contact || column.gap_closed()) return false;
+    return column.stance().gap_closure_m >= 2.0 * fixed_.column.section.tube->end_gap_m;
+  }
+
+  /// Anything but a quiet step: its time must be closed in on.
+  [[nodiscard]] bool is_eventful(Standing standing, const StandingColumn& tried) const {
+    if (standing != Standing::stands || closes_gap(tried)) return true;
+    return fixed_.model == ConfinementModel::contact && in_contact(tried) != in_contact(standing_);
+  }
+
+  /// Moves to `t_s`, halving the step around every event. False when the column falls on the way.
+  bool go_to(double t_s) {
+    while (standing_.time_s() < t_s) {
+      double step = t_s - standing_.time_s();
+      for (;;) {
+        StandingColumn tried = standing_;
+        const double to_s = step == t_s - standing_.time_s() ? t_s : standing_.time_s() + step;
+        const Standing standing = move(tried, to_s);
+        const bool eventful = is_eventful(standing, tried);
+        if (eventful && step > kTimeResolution_s) {
+          step *= 0.5;
+          continue;
+        }
+        if (standing == Standing::lost) throw lost_at(to_s);
+        if (standing == Standing::falls) return fall();
+        if (eventful && !pass_event(tried)) return false;
+        standing_ = std::move(tried);
+        break;
+      }
+    }
+    return true;
+  }
+
+  Standing move(StandingColumn& column, double to_s) {
+    try {
+      return column.move_to(*in_time_.at(to_s));
+    } catch (const Error& error) {
+      if (error.kind() != ErrorKind::solver_breakdown) throw;
+      return Standing::lost;  // a shorter step may succeed
+    }
+  }
+
+  /// Contact lost or regained, or the end gap closed. False when the column falls with it.
+  bool pass_event(StandingColumn& tried) {
+    const bool contact_before = in_contact(standing_);
+    if (closes_gap(tried)) {
+      history_.events.push_back({TubeEventKind::end_gap_closed, tried.time_s()});
+      add_sample();
+      tried.close_gap();
+      const Standing after = move(tried, tried.time_s());
+      if (after == Standing::lost) throw lost_at(tried.time_s());
+      if (after == Standing::falls) {
+        history_.fell_with_gap = true;
+        return fall();
+      }
+      return true;
+    }
+    if (in_contact(tried) != contact_before) {
+      history_.events.push_back(
+          {contact_before ? TubeEventKind::contact_lost : TubeEventKind::contact_regained,
+           tried.time_s()});
+      add_sample();
+    }
+    return true;
+  }
+
+  /// The last time at which the column stood is its fire resistance.
+  bool fall() {
+    history_.fall_s = standing_.time_s();
+    if (!sampling_) return false;
+    add_sample();
+    const CapacitySample& last = history_.samples.back();
+    history_.reserve_N = std::max(last.capacity_N, standing_.reserve_N());
+    history_.fell_by_stability = last.capacity_N < 0.9 * section_N();
+    return false;
+  }
+
+  /// Largest axial force at zero curvature, coarsely: only to name what governs.
+  [[nodiscard]] double section_N() const {
+    const HotSection& section = standing_.section();
+    double largest = 0.0;
+    constexpr int kCount = 200;
+    for (int k = 0; k <= kCount; ++k) {
+      const double share = static_cast<double>(k) / kCount;
+      const double eps =
+          section.least_strain() + share * (0.02 - section.least_strain());
+      largest = std::max(largest, section.axial_force_N(eps));
+    }
+    return largest;
+  }
+
+  void add_sample() {
+    if (!sampling_) return;
+    if (!history_.samples.empty() && history_.samples.back().time_s == standing_.time_s()) return;
+    const PathPoint limit = standing_.limit();
+    const PathPoint& load = standing_.stance().point;
+    history_.samples.push_back({standing_.time_s(), standing_.force_N(limit), limit.hoop_Pa,
+                                limit.pressure_Pa, load.hoop_Pa, load.pressure_Pa});
+    before_last_ = last_;
+    last_ = standing_;
+  }
+
+  void add_overloaded() {
+    const PathPoint& limit = standing_.stance().point;
+    history_.samples.push_back(
+        {0.0, standing_.force_N(limit), limit.hoop_Pa, limit.pressure_Pa, 0.0, 0.0});
+    history_.reserve_N = history_.samples.back().capacity_N;
+  }
+
+  /// An inner minimum of capacity close enough to the load to hide a fall between samples.
+  [[nodiscard]] bool dips_between_samples() const {
+    const std::size_t n = history_.samples.size();
+    if (n < 3) return false;
+    const double before = history_.samples[n - 3].capacity_N;
+    const double middle = history_.samples[n - 2].capacity_N;
+    const double after = history_.samples[n - 1].capacity_N;
+    if (middle >= before || middle >= after) return false;
+    return middle - fixed_.load_N < std::max(before, after) - middle;
+  }
+
+  /// Walks again through the two intervals around a minimum in short steps.
+  bool recheck_dip() {
+    if (!before_last_) return true;
+    const std::size_t n = history_.samples.size();
+    const double end_s = history_.samples[n - 1].time_s;
+    StandingColumn walker = history_.samples[n - 2].time_s < end_s ? *before_last_ : standing_;
+    std::swap(walker, standing_);
+    constexpr int kSteps = 32;
+    const double start_s = standing_.time_s();
+    for (int k = 1; k <= kSteps; ++k) {
+      if (!go_to(start_s + (end_s - start_s) * k / kSteps)) return false;
+    }
+    return true;
+  }
+
+  StandingCase fixed_;
+  MaterialsInTime& in_time_;
+  StandingColumn standing_;
+  std::optional<StandingColumn> last_;
+  std::optional<StandingColumn> before_last_;
+  CaseHistory history_;
+  bool sampling_ = true;
+};
+
+}  // namespace
+
+CaseHistory follow_case(const StandingCase& fixed, MaterialsInTime& in_time,
+                        const std::vector<double>& sample_s, double until_s) {
+  return CaseFollower(fixed, in_time).run(sample_s, until_s);
+}
+
+std::optional<StandingColumn> follow_to(const StandingCase& fixed, MaterialsInTime& in_time,
+                                        double t_s, CaseHistory& history) {
+  return CaseFollower(fixed, in_time).run_to(t_s, history);
+}
+
+}  // namespace ringward::mechanical

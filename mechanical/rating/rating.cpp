@@ -1,0 +1,88 @@
+#include "mechanical/rating/rating.hpp"
+
+#include <algorithm>
+#include <cmath>
+
+#include "mechanical/rating/rating_notices.hpp"
+#include "mechanical/rating/single_rating.hpp"
+
+namespace ringward::mechanical {
+namespace {
+
+// The second grid of the error estimate: every cell and time tolerance this much coarser.
+constexpr double kCoarserScale = 1.5;
+// With an observed order of two the error of the finer answer is the difference over 1.5^2 - 1 = 1.25;
+// the whole difference is stated, which leaves room for an order as low as 1.7.
+constexpr double kErrorPerDifference = 1.0;
+
+bool tube_confines(const Column& column) {
+  return column.section.is_circular() && column.section.tube &&
+         column.section.tube->role == thermal::TubeRole::confining;
+}
+
+/// All models on one temperature history; the setup is shared, because neither directions nor
+/// fibres depend on the model.
+class HistoryRating {
+ public:
+  HistoryRating(const Column& column, const thermal::TemperatureHistory& history)
+      : column_(column),
+        materials_(column, history),
+        in_time_(materials_),
+        setup_(member_setup(column, materials_)) {}
+
+  SingleRating rate(ConfinementModel model) { return rate_single(column_, model, setup_, in_time_); }
+
+ private:
+  const Column& column_;
+  SectionMaterials materials_;
+  MaterialsInTime in_time_;
+  MemberSetup setup_;
+};
+
+double resistance_or(const std::optional<double>& fire_resistance_s, double followed_s) {
+  return fire_resistance_s.value_or(followed_s);
+}
+
+double numerical_uncertainty_s(const Column& column, const thermal::FireExposure& fire,
+                               thermal::Accuracy accuracy, const SingleRating& chosen) {
+  const thermal::TemperatureHistory coarser =
+      solve_heat_flow(column.section, fire, {.accuracy = accuracy, .scale = kCoarserScale});
+  const SingleRating again = HistoryRating(column, coarser).rate(column.confinement);
+  const double difference_s = std::abs(resistance_or(chosen.fire_resistance_s, fire.duration_s) -
+                                       resistance_or(again.fire_resistance_s, fire.duration_s));
+  return kErrorPerDifference * difference_s + kTimeResolution_s;
+}
+
+Bounds bounds_of(const SingleRating& none, const SingleRating& contact, const SingleRating& yield) {
+  return {none.fire_resistance_s, contact.fire_resistance_s, yield.fire_resistance_s};
+}
+
+}  // namespace
+
+Rating rate(const Column& column, const thermal::FireExposure& fire, thermal::Accuracy accuracy) {
+  const thermal::TemperatureHistory history =
+      solve_heat_flow(column.section, fire, {.accuracy = accuracy});
+  HistoryRating rerate(column, history);
+  Rating rating;
+  rating.chosen = rerate.rate(column.confinement);
+  rating.followed_s = history.end_s();
+  rating.heat_flow = history.statistics();
+  if (tube_confines(column)) {
+    const auto with = [&](ConfinementModel model) {
+      return model == column.confinement ? rating.chosen : rerate.rate(model);
+    };
+    const SingleRating none = with(ConfinementModel::none);
+    rating.bounds = bounds_of(none, with(ConfinementModel::contact), with(ConfinementModel::yield));
+    rating.cold_confinement_ratio = rating.chosen.cold_capacity_N / none.cold_capacity_N;
+  } else {
+    rating.bounds = bounds_of(rating.chosen, rating.chosen, rating.chosen);
+  }
+  if (resistance_or(rating.chosen.fire_resistance_s, 1.0) > 0.0) {
+    rating.uncertainty_s = numerical_uncertainty_s(column, fire, accuracy, rating.chosen);
+  }
+  rating.notices = rating_notices(column, fire, rating);
+  rating.notices.insert(rating.notices.end(), history.notices().begin(), history.notices().end());
+  return rating;
+}
+
+}  // namespace ringward::mechanical

@@ -1,0 +1,100 @@
+#include "cli/input/schema_tables.hpp"
+
+namespace ringward::cli {
+namespace {
+
+const char* const kLengths = "lengths are in mm";
+
+}  // namespace
+
+std::vector<KeySpec> member_keys() {
+  return {
+      {.key = "confinement",
+       .type = KeyType::table,
+       .need = Need::defaulted,
+       .help = "What the tube does to the core."},
+      {.key = "confinement.model",
+       .type = KeyType::choice,
+       .computed = "\"contact\" for circular confining tubes, \"none\" for everything else",
+       .choices = {"none", "contact", "yield"},
+       .example = "\"contact\"",
+       .help = "none: unconfined core; contact: the hot tube grips only where the core's own "
+               "dilation closes the gap; yield: the tube yields whatever the strain, an upper "
+               "bound.",
+       .source = "teng2007"},
+      {.key = "member",
+       .type = KeyType::table,
+       .need = Need::required,
+       .help = "The column between its restraints."},
+      {.key = "member.length_mm",
+       .need = Need::required,
+       .unit = "mm",
+       .range = closed(100, 100000),
+       .example = "4000",
+       .help = "Length between restraints.",
+       .advice = kLengths},
+      {.key = "member.buckling_length_mm",
+       .unit = "mm",
+       .range = closed(10, 500000),
+       .computed = "buckling_factor times length_mm",
+       .example = "2000",
+       .help = "Buckling length in the fire situation, instead of buckling_factor.",
+       .source = "en1992-1-2-2004 5.3.2",
+       .advice = kLengths},
+      {.key = "member.buckling_factor",
+       .range = closed(0.1, 5),
+       .fallback = "1",
+       .help = "Buckling length over length; 0.7 (top storey) and 0.5 (continuous at both ends) "
+               "are for braced frames whose colder members hold the ends.",
+       .source = "en1992-1-2-2004 5.3.2",
+       .advice = "give it as a fraction of member.length_mm"},
+      {.key = "member.imperfection_mm",
+       .unit = "mm",
+       .range = closed(0, 1000),
+       .computed = "buckling length / 400",
+       .example = "5",
+       .help = "Amplitude of the initial bow, one half-sine.",
+       .source = "en1992-1-1-2004 5.2",
+       .advice = kLengths},
+      {.key = "load",
+       .type = KeyType::table,
+       .need = Need::required,
+       .help = "Action on the column in the fire situation, equal at both ends."},
+      {.key = "load.axial_kN",
+       .need = Need::required,
+       .unit = "kN",
+       .range = above(0, 1e6),
+       .example = "1500",
+       .help = "Axial force in the fire situation, compression positive, constant in time.",
+       .advice = "compression is positive, and columns without load or in tension are not covered"},
+      {.key = "load.eccentricity_x_mm",
+       .unit = "mm",
+       .range = closed(-10000, 10000),
+       .fallback = "0",
+       .help = "Moves the load along x; positive compresses the +x side.",
+       .advice = kLengths},
+      {.key = "load.eccentricity_y_mm",
+       .unit = "mm",
+       .range = closed(-10000, 10000),
+       .fallback = "0",
+       .help = "Moves the load along y; positive compresses the +y side.",
+       .advice = kLengths},
+      {.key = "load.moment_x_kNm",
+       .unit = "kNm",
+       .range = closed(-1e5, 1e5),
+       .computed = "none: the eccentricities apply",
+       .example = "0",
+       .help = "End moment of the fire situation along x instead of an eccentricity, constant in "
+               "time; capacity is then the axial force at this moment.",
+       .advice = "moments are in kNm"},
+      {.key = "load.moment_y_kNm",
+       .unit = "kNm",
+       .range = closed(-1e5, 1e5),
+       .computed = "none: the eccentricities apply",
+       .example = "0",
+       .help = "End moment of the fire situation along y, as moment_x_kNm.",
+       .advice = "moments are in kNm"},
+  };
+}
+
+}  // namespace ringward::cli

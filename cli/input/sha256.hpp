@@ -1,0 +1,10 @@
+#pragma once
+
+#include <string>
+
+namespace ringward::cli {
+
+/// SHA-256 of bytes as 64 lower-case hexadecimal digits.
+[[nodiscard]] std::string sha256_hex(const std::string& bytes);
+
+}  // namespace ringward::cli

@@ -4,7 +4,7 @@
 namespace ringward::mechanical {
 namespace {
 
-constexpr double kSteelE_Pa = 210e9;  ///< @source en1993-1-2-2005 3.2.1, en1993-1-1-2005 3.2.6
+constexpr double kSteelE_Pa = 210e9;  ///< @source en1993-1-2-2005 3.2.1
 
 /// k_y, k_p, k_E of carbon steel.
 /// @source en1993-1-2-2005 Table 3.1

@@ -6,7 +6,8 @@ namespace ringward::mechanical {
 // Mises yielding then leaves less hoop stress. With s = sigma / f_y, phi a parameter and
 // xi = mu h / D the distance from the cut end:
 //   s_v = (2/sqrt 3) sin phi,  s_h = cos phi - sin phi / sqrt 3,  xi = (sqrt 3 phi - ln s_h) / 4,
-// the exact solution of ds_v/dxi = 2 s_h on s_h^2 + s_h s_v + s_v^2 = 1 (docs/theory.md derives it).
+// the exact solution of ds_v/dxi = 2 s_h on s_h^2 + s_h s_v + s_v^2 = 1 (docs/theory.md derives
+// it).
 
 /// Distance from a cut end, xi = mu h / D, at which slip stops: there s_h = s_v = 1/sqrt 3
 /// (dilation ratio 1). Equal to (sqrt 3 pi / 6 + ln sqrt 3) / 4 = 0.36405.

@@ -27,10 +27,14 @@ class SectionMoments {
   [[nodiscard]] std::vector<Sum> sums(int m, int n) const {
     std::vector<Sum> result;
     for (const HotMaterials& hot : times_) {
-      result.push_back(sum(layout_.concrete, m, n, [&](std::size_t s) { return hot.concrete[s].f_c_Pa; }));
-      result.push_back(sum(layout_.concrete, m, n, [&](std::size_t s) { return hot.concrete[s].thermal_strain; }));
-      result.push_back(sum(layout_.steel, m, n, [&](std::size_t s) { return hot.steel[s].f_y_Pa; }));
-      result.push_back(sum(layout_.steel, m, n, [&](std::size_t s) { return hot.steel[s].thermal_strain; }));
+      result.push_back(
+          sum(layout_.concrete, m, n, [&](std::size_t s) { return hot.concrete[s].f_c_Pa; }));
+      result.push_back(sum(layout_.concrete, m, n,
+                           [&](std::size_t s) { return hot.concrete[s].thermal_strain; }));
+      result.push_back(
+          sum(layout_.steel, m, n, [&](std::size_t s) { return hot.steel[s].f_y_Pa; }));
+      result.push_back(
+          sum(layout_.steel, m, n, [&](std::size_t s) { return hot.steel[s].thermal_strain; }));
     }
     return result;
   }
@@ -121,8 +125,7 @@ void add_ring_directions(std::vector<Direction>& directions, const thermal::Sect
     const thermal::Point& first = group.positions.front();
     const double angle = std::atan2(first.y_m, first.x_m);
     directions.push_back(towards(angle));
-    directions.push_back(
-        towards(angle + units::kPi / static_cast<double>(group.positions.size())));
+    directions.push_back(towards(angle + units::kPi / static_cast<double>(group.positions.size())));
   }
 }
 
@@ -133,7 +136,8 @@ std::vector<Direction> candidate_directions(const Column& column) {
   const double along_y = load.moments_given ? load.moment_y_Nm : load.eccentricity_y_m;
   const double size = std::hypot(along_x, along_y);
   if (size > 0.0) directions.push_back({along_x / size, along_y / size});
-  for (const Direction& d : {Direction{1, 0}, Direction{-1, 0}, Direction{0, 1}, Direction{0, -1}}) {
+  for (const Direction& d :
+       {Direction{1, 0}, Direction{-1, 0}, Direction{0, 1}, Direction{0, -1}}) {
     directions.push_back(d);
   }
   if (column.section.is_circular()) add_ring_directions(directions, column.section);
@@ -185,8 +189,9 @@ MemberSetup member_setup(const Column& column, const SectionMaterials& materials
     doubly_symmetric = doubly_symmetric && symmetric_about_v(moments);
     bending.loading.biaxial = !symmetric || bends_sideways(bending.loading);
     if (!bending.loading.biaxial) bending.layout = merged_in_v(bending.layout);
-    const bool known = std::any_of(setup.cases.begin(), setup.cases.end(),
-                                   [&](const BendingCase& c) { return equivalent(c, bending, times); });
+    const bool known =
+        std::any_of(setup.cases.begin(), setup.cases.end(),
+                    [&](const BendingCase& c) { return equivalent(c, bending, times); });
     if (!known) setup.cases.push_back(std::move(bending));
   }
   const double length_m = column.member.buckling_length_m;

@@ -12,8 +12,8 @@ namespace ringward::mechanical {
 
 /// One candidate for the worst direction of the imperfection.
 struct BendingCase {
-  Direction direction;    ///< u: the imperfection points this way
-  FibreLayout layout;     ///< in the axes of the direction; merged when bending is uniaxial
+  Direction direction;  ///< u: the imperfection points this way
+  FibreLayout layout;   ///< in the axes of the direction; merged when bending is uniaxial
   MemberLoading loading;
 };
 

@@ -19,9 +19,8 @@ struct GaussPoint {
   double at;
   double weight;
 };
-constexpr std::array<GaussPoint, 3> kGauss{{{-0.7745966692414834, 5.0 / 9.0},
-                                            {0.0, 8.0 / 9.0},
-                                            {0.7745966692414834, 5.0 / 9.0}}};
+constexpr std::array<GaussPoint, 3> kGauss{
+    {{-0.7745966692414834, 5.0 / 9.0}, {0.0, 8.0 / 9.0}, {0.7745966692414834, 5.0 / 9.0}}};
 
 /// Adds the integral over [from, to] of (L - max(z, x)) kappa(x) dx, kappa quadratic on the pair of
 /// intervals that starts at node `first`.

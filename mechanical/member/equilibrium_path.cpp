@@ -12,7 +12,7 @@ namespace {
 constexpr double kResidualTolerance = 1e-9;  // of the reference force
 constexpr int kNewtonLimit = 12;
 constexpr double kFirstStep = 0.05;
-constexpr double kLargestStep = 0.5;     // 0.05 % strain: far below the distance between two peaks
+constexpr double kLargestStep = 0.5;  // 0.05 % strain: far below the distance between two peaks
 constexpr double kSmallestStep = 1e-7;
 constexpr double kForceTolerance = 1e-8;
 constexpr double kCrushedStrain = 0.06;  // beyond eps_cu1 of any temperature
@@ -75,7 +75,8 @@ std::optional<PathPoint> EquilibriumPath::at_force(const PathPoint& from, double
   const double gap = scaled_N - from.scaled_N();
   guess += from.tangent * (gap / from.N_slope());
   guess(guess.size() - 1) = scaled_N;
-  std::optional<PathPoint> found = project(guess, Eigen::VectorXd::Unit(guess.size(), guess.size() - 1));
+  std::optional<PathPoint> found =
+      project(guess, Eigen::VectorXd::Unit(guess.size(), guess.size() - 1));
   if (!found) return std::nullopt;
   // `along` was normalised against the force axis: forward means rising force here.
   if (found->tangent.dot(from.tangent) <= 0.0) return std::nullopt;

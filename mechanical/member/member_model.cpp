@@ -43,7 +43,8 @@ void MemberModel::fill_station(const Eigen::VectorXd& q, Eigen::Index station,
   const Eigen::Index n_column = equations();
   // Residuals over the reference force, moments also over the extent of the section.
   const double arm_u = loading_.eccentricity_u_m +
-                       loading_.imperfection_m * shape_.imperfection(station) + lever(q, station, 1);
+                       loading_.imperfection_m * shape_.imperfection(station) +
+                       lever(q, station, 1);
   out.residual(row) = (answer.N_N - N) / reference_N_;
   out.residual(row + 1) =
       (answer.M_u_Nm - N * arm_u - loading_.moment_u_Nm) / (reference_N_ * extent);

@@ -10,12 +10,12 @@ namespace ringward::mechanical {
 /// What bends the column, in the axes of its direction. First-order moments at mid-height are
 /// N e + M; the imperfection and the deflection add N (e_imp + w).
 struct MemberLoading {
-  double imperfection_m = 0;     ///< along u, one half-sine
+  double imperfection_m = 0;  ///< along u, one half-sine
   double eccentricity_u_m = 0;
   double eccentricity_v_m = 0;
-  double moment_u_Nm = 0;        ///< constant
+  double moment_u_Nm = 0;  ///< constant
   double moment_v_Nm = 0;
-  bool biaxial = false;          ///< both curvatures are free
+  bool biaxial = false;  ///< both curvatures are free
 };
 
 /// The second-order model column: equilibrium of every station with the deflection that all of
@@ -37,7 +37,9 @@ class MemberModel {
   };
   [[nodiscard]] Linearised linearise(const Eigen::VectorXd& unknowns) const;
 
-  [[nodiscard]] double axial_N(const Eigen::VectorXd& q) const { return q(equations()) * reference_N_; }
+  [[nodiscard]] double axial_N(const Eigen::VectorXd& q) const {
+    return q(equations()) * reference_N_;
+  }
   [[nodiscard]] double scaled_N(double axial_N) const { return axial_N / reference_N_; }
   [[nodiscard]] StrainPlane plane(const Eigen::VectorXd& q, Eigen::Index station) const;
   /// Unknowns with the same total strain eps0 at every station, no curvature and no force.
@@ -45,7 +47,8 @@ class MemberModel {
   [[nodiscard]] const HotSection& section() const { return section_; }
 
  private:
-  [[nodiscard]] double lever(const Eigen::VectorXd& q, Eigen::Index station, Eigen::Index part) const;
+  [[nodiscard]] double lever(const Eigen::VectorXd& q, Eigen::Index station,
+                             Eigen::Index part) const;
   void fill_station(const Eigen::VectorXd& q, Eigen::Index station, Linearised& out) const;
 
   const HotSection& section_;

@@ -1,7 +1,6 @@
 #include <algorithm>
 #include <array>
 
-#include "mechanical/confinement/slip.hpp"
 #include "mechanical/rating/single_rating.hpp"
 #include "thermal/base/error.hpp"
 
@@ -71,19 +70,15 @@ MemberState member_state(StandingCase fixed, MaterialsInTime& in_time, double t_
 double section_N(const Column& column, const SectionMaterials& materials, const HotMaterials& hot) {
   const FibreLayout layout =
       merged_in_v(fibre_layout(column.section, materials.history().grid(), Direction{1, 0}));
-  const double hoop = column.section.tube
-                          ? tube_profile(column.section.tube->friction, column.section.core_width_m(),
-                                         column.section.tube->clear_height_m)
-                                .mid_height_hoop
-                          : 0.0;
-  const TubeGrip grip = tube_grip(column, column.confinement, layout, hot, hoop);
+  const TubeGrip grip = tube_grip(column, column.confinement, layout, hot);
   const HotSection section(layout, hot, grip, materials.cold_concrete_Pa());
   const auto force = [&](double eps0) { return section.axial_force_N(eps0); };
   return largest_value(force, section.least_strain(), section.largest_strain(), 1500);
 }
 
 double plastic_N(const Column& column, const SectionMaterials& materials, const HotMaterials& hot) {
-  const FibreLayout layout = fibre_layout(column.section, materials.history().grid(), Direction{1, 0});
+  const FibreLayout layout =
+      fibre_layout(column.section, materials.history().grid(), Direction{1, 0});
   return HotSection(layout, hot, TubeGrip{}, materials.cold_concrete_Pa()).plastic_N();
 }
 
@@ -104,8 +99,8 @@ std::vector<CapacityState> capacities(const Column& column,
                         .demand_N = column.load.axial_N};
     bool first = true;
     for (const BendingCase& bending : setup.cases) {
-      const StandingCase fixed{column, materials, setup.shape, bending, column.confinement,
-                               column.load.axial_N};
+      const StandingCase fixed{column,  materials,          setup.shape,
+                               bending, column.confinement, column.load.axial_N};
       const MemberState member = member_state(fixed, in_time, t_s);
       if (first || member.capacity_N < state.capacity_N) {
         state.capacity_N = member.capacity_N;

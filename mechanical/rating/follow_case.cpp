@@ -48,9 +48,8 @@ class CaseFollower {
   }
 
   [[nodiscard]] Error lost_at(double t_s) const {
-    return {ErrorKind::solver_breakdown,
-            "the equilibrium of the member could not be computed at " +
-                std::to_string(units::min_from_s(t_s)) + " min"};
+    return {ErrorKind::solver_breakdown, "the equilibrium of the member could not be computed at " +
+                                             std::to_string(units::min_from_s(t_s)) + " min"};
   }
 
   [[nodiscard]] bool in_contact(const StandingColumn& column) const {
@@ -142,8 +141,7 @@ class CaseFollower {
     constexpr int kCount = 200;
     for (int k = 0; k <= kCount; ++k) {
       const double share = static_cast<double>(k) / kCount;
-      const double eps =
-          section.least_strain() + share * (0.02 - section.least_strain());
+      const double eps = section.least_strain() + share * (0.02 - section.least_strain());
       largest = std::max(largest, section.axial_force_N(eps));
     }
     return largest;

@@ -11,8 +11,8 @@ namespace {
 
 // The second grid of the error estimate: every cell and time tolerance this much coarser.
 constexpr double kCoarserScale = 1.5;
-// With an observed order of two the error of the finer answer is the difference over 1.5^2 - 1 = 1.25;
-// the whole difference is stated, which leaves room for an order as low as 1.7.
+// With an observed order of two the error of the finer answer is the difference over 1.5^2 - 1
+// = 1.25; the whole difference is stated, which leaves room for an order as low as 1.7.
 constexpr double kErrorPerDifference = 1.0;
 
 bool tube_confines(const Column& column) {
@@ -30,7 +30,9 @@ class HistoryRating {
         in_time_(materials_),
         setup_(member_setup(column, materials_)) {}
 
-  SingleRating rate(ConfinementModel model) { return rate_single(column_, model, setup_, in_time_); }
+  SingleRating rate(ConfinementModel model) {
+    return rate_single(column_, model, setup_, in_time_);
+  }
 
  private:
   const Column& column_;

@@ -58,7 +58,8 @@ struct Rating {
   double followed_s = 0;
   double uncertainty_s = 0;  ///< numerical only: grid and time step
   Bounds bounds;
-  std::optional<double> cold_confinement_ratio;  ///< confined over unconfined member capacity at 20 C
+  std::optional<double>
+      cold_confinement_ratio;  ///< confined over unconfined member capacity at 20 C
   thermal::HeatFlowStatistics heat_flow;
   Notices notices;
 };

@@ -52,19 +52,22 @@ void tube_events(NoticeWriter& write, const Column& column, const SingleRating& 
       case TubeEventKind::contact_lost:
         write.caution("contact-lost",
                       fmt::format("Under the applied load the tube loses contact with the core at "
-                                  "{:.1f} min: from then on it does not confine at this load.", t_min));
+                                  "{:.1f} min: from then on it does not confine at this load.",
+                                  t_min));
         break;
       case TubeEventKind::contact_regained:
         write.note("contact-regained",
                    fmt::format("Under the applied load the dilating core meets the tube again at "
-                               "{:.1f} min.", t_min));
+                               "{:.1f} min.",
+                               t_min));
         break;
       case TubeEventKind::end_gap_closed:
-        write.caution("end-gap-closed",
-                      fmt::format("The heated tube closes its end gaps of {:.0f} mm at {:.1f} min: it "
-                                  "then bears on the joint, carries axial force that is not credited "
-                                  "here, and is no longer counted as confinement.",
-                                  units::mm_from_m(column.section.tube->end_gap_m), t_min));
+        write.caution(
+            "end-gap-closed",
+            fmt::format("The heated tube closes its end gaps of {:.0f} mm at {:.1f} min: it "
+                        "then bears on the joint, carries axial force that is not credited "
+                        "here, and is no longer counted as confinement.",
+                        units::mm_from_m(column.section.tube->end_gap_m), t_min));
         break;
     }
   }
@@ -75,8 +78,10 @@ void confinement_worth(NoticeWriter& write, const Column& column, const Rating& 
   const double ratio = *rating.cold_confinement_ratio;
   const double level = column.load.axial_N / rating.chosen.cold_capacity_N;
   const std::string text = fmt::format(
-      "At 20 C confinement multiplies the member's resistance by {:.2f}; the load is {:.0f} % of the "
-      "cold resistance.", ratio, 100.0 * level);
+      "At 20 C confinement multiplies the member's resistance by {:.2f}; the load is {:.0f} % of "
+      "the "
+      "cold resistance.",
+      ratio, 100.0 * level);
   if (ratio > kHighConfinementRatio) {
     write.caution("cold-confinement-gain",
                   text + " A bare tube gives that gain up within the first half hour of a fire.");
@@ -85,12 +90,14 @@ void confinement_worth(NoticeWriter& write, const Column& column, const Rating& 
   }
 }
 
-void uniform_pressure(NoticeWriter& write, const Column& column, const thermal::FireExposure& fire) {
+void uniform_pressure(NoticeWriter& write, const Column& column,
+                      const thermal::FireExposure& fire) {
   if (column.confinement == ConfinementModel::none) return;
   if (!is_eccentric(column.load) && is_heated_all_round(fire)) return;
-  write.caution("uniform-pressure",
-                "One uniform pressure of the tube on the whole core is assumed although the load is "
-                "eccentric or the heating one-sided.");
+  write.caution(
+      "uniform-pressure",
+      "One uniform pressure of the tube on the whole core is assumed although the load is "
+      "eccentric or the heating one-sided.");
 }
 
 void yield_model(NoticeWriter& write, const Column& column) {
@@ -104,27 +111,29 @@ void reserve(NoticeWriter& write, const SingleRating& chosen) {
   if (!chosen.fire_resistance_s || chosen.history.empty()) return;
   const double capacity_N = chosen.history.back().capacity_N;
   if (chosen.reserve_N < kReserveWorthNaming * capacity_N) return;
-  write.note("reserve-at-larger-strain",
-             fmt::format("At the failure time a peak of {:.0f} kN exists at larger strain; the column "
-                         "would have to drop onto it, so it is a reserve and never the rating.",
-                         units::kN_from_N(chosen.reserve_N)));
+  write.note(
+      "reserve-at-larger-strain",
+      fmt::format("At the failure time a peak of {:.0f} kN exists at larger strain; the column "
+                  "would have to drop onto it, so it is a reserve and never the rating.",
+                  units::kN_from_N(chosen.reserve_N)));
 }
 
 void cold_overload(NoticeWriter& write, const Column& column, const SingleRating& chosen) {
   if (!chosen.fire_resistance_s || *chosen.fire_resistance_s > 0.0) return;
-  write.caution("load-above-cold-resistance",
-                fmt::format("The load of {:.0f} kN exceeds the resistance of {:.0f} kN at 20 C.",
-                            units::kN_from_N(column.load.axial_N),
-                            units::kN_from_N(chosen.cold_capacity_N)));
+  write.caution(
+      "load-above-cold-resistance",
+      fmt::format("The load of {:.0f} kN exceeds the resistance of {:.0f} kN at 20 C.",
+                  units::kN_from_N(column.load.axial_N), units::kN_from_N(chosen.cold_capacity_N)));
 }
 
 void cooling(NoticeWriter& write, const Column& column, const thermal::FireExposure& fire) {
   if (!fire.gas.has_cooling) return;
-  write.caution("cooling-simplified",
-                "Cooling: concrete follows its residual strength; bars, steel shape and tube keep the "
-                "strength of their highest temperature. Columns have failed while cooling, after the "
-                "fire.",
-                "en1994-1-2-2005");
+  write.caution(
+      "cooling-simplified",
+      "Cooling: concrete follows its residual strength; bars, steel shape and tube keep the "
+      "strength of their highest temperature. Columns have failed while cooling, after the "
+      "fire.",
+      "en1994-1-2-2005");
   if (confines(column)) {
     write.note("re-grip-not-credited",
                "The grip that a cooling, shrinking tube regains is not credited.");
@@ -133,9 +142,10 @@ void cooling(NoticeWriter& write, const Column& column, const thermal::FireExpos
 
 void composite_tube(NoticeWriter& write, const Column& column) {
   if (!column.section.tube || column.section.tube->role != thermal::TubeRole::composite) return;
-  write.note("composite-tube",
-             "The tube carries axial force with the core and is not counted as confinement as well; "
-             "local buckling of its wall is not modelled.");
+  write.note(
+      "composite-tube",
+      "The tube carries axial force with the core and is not counted as confinement as well; "
+      "local buckling of its wall is not modelled.");
 }
 
 void slip_zone(NoticeWriter& write, const Column& column) {

@@ -66,8 +66,9 @@ std::string criterion_of(const CaseHistory& governing, const Column& column) {
   if (*governing.fall_s == 0.0) return "load above the resistance at 20 C";
   if (governing.fell_with_gap) return "loss of confinement when the end gap closes";
   const Load& load = column.load;
-  const bool eccentric = load.moments_given ? load.moment_x_Nm != 0.0 || load.moment_y_Nm != 0.0
-                                            : load.eccentricity_x_m != 0.0 || load.eccentricity_y_m != 0.0;
+  const bool eccentric = load.moments_given
+                             ? load.moment_x_Nm != 0.0 || load.moment_y_Nm != 0.0
+                             : load.eccentricity_x_m != 0.0 || load.eccentricity_y_m != 0.0;
   if (eccentric) return "bending with axial force";
   return governing.fell_by_stability ? "buckling (second-order moment)" : "axial resistance";
 }
@@ -93,7 +94,8 @@ bool is_history_time(double t_s) {
 
 std::vector<double> search_times(const thermal::TemperatureHistory& history) {
   std::vector<double> times{history.end_s()};
-  for (double t_s = 0.0; t_s < history.end_s(); t_s += t_s < 600.0 ? 30.0 : 60.0) times.push_back(t_s);
+  for (double t_s = 0.0; t_s < history.end_s(); t_s += t_s < 600.0 ? 30.0 : 60.0)
+    times.push_back(t_s);
   for (const double kink_s : history.kinks_s()) times.push_back(kink_s);
   std::sort(times.begin(), times.end());
   const auto close = [](double a, double b) { return b - a < 1e-6; };
@@ -108,8 +110,8 @@ SingleRating rate_single(const Column& column, ConfinementModel model, const Mem
   std::vector<CaseHistory> cases;
   std::size_t governing = 0;
   for (const BendingCase& bending : setup.cases) {
-    const StandingCase fixed{column, in_time.materials(), setup.shape, bending, model,
-                             column.load.axial_N};
+    const StandingCase fixed{column, in_time.materials(), setup.shape, bending,
+                             model,  column.load.axial_N};
     cases.push_back(follow_case(fixed, in_time, times, until_s));
     if (cases.back().fall_s && (cases.size() == 1 || *cases.back().fall_s < until_s)) {
       governing = cases.size() - 1;

@@ -1,15 +1,7 @@
 #include "mechanical/rating/standing_column.hpp"
 
-#include "mechanical/confinement/slip.hpp"
-
 namespace ringward::mechanical {
 namespace {
-
-double mid_height_hoop(const thermal::Section& section) {
-  if (!section.tube) return 0.0;
-  return tube_profile(section.tube->friction, section.core_width_m(), section.tube->clear_height_m)
-      .mid_height_hoop;
-}
 
 /// Constant end moments are reached through the eccentricity that gives them at the applied load.
 MemberLoading as_eccentricity(const MemberLoading& loading, double load_N) {
@@ -27,8 +19,7 @@ constexpr double kStartStrain = 1e-5;
 
 void StandingColumn::build(const HotMaterials& hot) {
   const ConfinementModel model = gap_closed_ ? ConfinementModel::none : fixed_->model;
-  const TubeGrip grip = tube_grip(fixed_->column, model, fixed_->bending.layout, hot,
-                                  mid_height_hoop(fixed_->column.section));
+  const TubeGrip grip = tube_grip(fixed_->column, model, fixed_->bending.layout, hot);
   section_ = std::make_shared<HotSection>(fixed_->bending.layout, hot, grip,
                                           fixed_->materials.cold_concrete_Pa());
   model_ = std::make_shared<MemberModel>(*section_, fixed_->shape, fixed_->bending.loading,

@@ -79,7 +79,8 @@ void add_ring(LayoutBuilder& builder, const OrthogonalGrid& grid, std::size_t i,
 void add_images(LayoutBuilder& builder, const OrthogonalGrid& grid, std::size_t index) {
   const Cell& cell = grid.cells[index];
   for (const thermal::Image& image : grid.images) {
-    const XY at{image.xx * cell.x_m + image.xy * cell.y_m, image.yx * cell.x_m + image.yy * cell.y_m};
+    const XY at{image.xx * cell.x_m + image.xy * cell.y_m,
+                image.yx * cell.x_m + image.yy * cell.y_m};
     builder.add_cell(cell, index, at, 1.0);
   }
 }

@@ -7,12 +7,11 @@ namespace ringward::mechanical {
 using thermal::Cell;
 using thermal::Layer;
 
-SectionMaterials::SectionMaterials(const Column& column,
-                                   const thermal::TemperatureHistory& history)
+SectionMaterials::SectionMaterials(const Column& column, const thermal::TemperatureHistory& history)
     : history_(history) {
   const thermal::Section& section = column.section;
-  concrete_ = concrete_en1992(section.core.strength_Pa, section.core.aggregate,
-                              column.factors.concrete);
+  concrete_ =
+      concrete_en1992(section.core.strength_Pa, section.core.aggregate, column.factors.concrete);
   if (section.tube) {
     tube_law_ = structural_steel_en1993(section.tube->yield_Pa, column.factors.steel);
     tube_carries_ = section.tube->role == thermal::TubeRole::composite;

@@ -5,6 +5,7 @@
 
 #include "mechanical/confinement/confined_concrete.hpp"
 #include "mechanical/confinement/lateral_strain.hpp"
+#include "mechanical/confinement/slip.hpp"
 
 namespace ringward::mechanical {
 namespace {
@@ -86,11 +87,13 @@ void HotSection::add_concrete(const StrainPlane& plane, double p_Pa, SectionResp
       in_force = 3.0 * force * x * inverse;
       const double stiffness = 6.0 * force / peak.eps_cc * (1.0 - cube) * inverse * inverse;
       add_fibre(sum, c.u, c.v, in_force, stiffness);
-      slope_in_p = in_force / peak.strength_Pa * peak.strength_per_Pa - stiffness * x * peak.eps_per_Pa;
+      slope_in_p =
+          in_force / peak.strength_Pa * peak.strength_per_Pa - stiffness * x * peak.eps_per_Pa;
     } else if (eps < peak.eps_cc + c.drop) {
       in_force = force * (peak.eps_cc + c.drop - eps) / c.drop;
       add_fibre(sum, c.u, c.v, in_force, -force / c.drop);
-      slope_in_p = in_force / peak.strength_Pa * peak.strength_per_Pa + force / c.drop * peak.eps_per_Pa;
+      slope_in_p =
+          in_force / peak.strength_Pa * peak.strength_per_Pa + force / c.drop * peak.eps_per_Pa;
     }
     per_Pa += slope_in_p * Eigen::Vector3d(1.0, c.u, c.v);
   }
@@ -105,7 +108,8 @@ void HotSection::add_steel(const StrainPlane& plane, SectionResponse& sum) const
   }
 }
 
-// @source teng2007. Fibres in tension count zero; concrete displaced by bars is no fibre of its own.
+// @source teng2007. Fibres in tension count zero; concrete displaced by bars is no fibre of its
+// own.
 HotSection::Lateral HotSection::lateral_strain(const StrainPlane& plane, double p_Pa) const {
   const LateralStrainCurve& curve = lateral_strain_curve();
   Lateral result;
@@ -128,8 +132,8 @@ HotSection::Lateral HotSection::lateral_strain(const StrainPlane& plane, double 
   return result;
 }
 
-// g(p) = (2 t / D) sigma_h(e_h(p)) - p falls with p, because pressure holds the lateral strain back:
-// one root in [0, p at the cap], found by Newton inside a shrinking bracket.
+// g(p) = (2 t / D) sigma_h(e_h(p)) - p falls with p, because pressure holds the lateral strain
+// back: one root in [0, p at the cap], found by Newton inside a shrinking bracket.
 double HotSection::solve_pressure(const StrainPlane& plane, Eigen::Vector3d& slope) const {
   slope.setZero();
   const double p_cap = grip_.pressure_per_hoop * grip_.hoop_cap_Pa;
@@ -146,8 +150,8 @@ double HotSection::solve_pressure(const StrainPlane& plane, Eigen::Vector3d& slo
         steel_stress(grip_.steel, std::max(0.0, lateral.mean + grip_.free_hoop_strain));
     if (p >= p_cap && hoop.stress_Pa >= grip_.hoop_cap_Pa) return p_cap;
     const double g = grip_.pressure_per_hoop * std::min(hoop.stress_Pa, grip_.hoop_cap_Pa) - p;
-    const bool gripping = lateral.mean + grip_.free_hoop_strain > 0.0 &&
-                          hoop.stress_Pa < grip_.hoop_cap_Pa;
+    const bool gripping =
+        lateral.mean + grip_.free_hoop_strain > 0.0 && hoop.stress_Pa < grip_.hoop_cap_Pa;
     const double gain = gripping ? grip_.pressure_per_hoop * hoop.tangent_Pa : 0.0;
     const double g_slope = gain * lateral.per_Pa - 1.0;
     (g > 0.0 ? low : high) = p;
@@ -163,8 +167,7 @@ double HotSection::solve_pressure(const StrainPlane& plane, Eigen::Vector3d& slo
 SectionResponse HotSection::response(const StrainPlane& plane) const {
   SectionResponse sum;
   Eigen::Vector3d p_slope = Eigen::Vector3d::Zero();
-  const double p_Pa =
-      grip_.model == ConfinementModel::none ? 0.0 : solve_pressure(plane, p_slope);
+  const double p_Pa = grip_.model == ConfinementModel::none ? 0.0 : solve_pressure(plane, p_slope);
   Eigen::Vector3d per_Pa = Eigen::Vector3d::Zero();
   if (p_Pa > 0.0) {
     add_concrete(plane, p_Pa, sum, per_Pa);
@@ -193,14 +196,16 @@ double mean_core_expansion(const FibreLayout& layout, const HotMaterials& hot) {
 }
 
 TubeGrip tube_grip(const Column& column, ConfinementModel model, const FibreLayout& layout,
-                   const HotMaterials& hot, double mid_height_hoop) {
+                   const HotMaterials& hot) {
   if (model == ConfinementModel::none || !hot.tube) return {};
   const thermal::Tube& tube = *column.section.tube;
+  const double core_diameter_m = column.section.core_width_m();
   const double core_expansion = mean_core_expansion(layout, hot);
+  const TubeProfile profile = tube_profile(tube.friction, core_diameter_m, tube.clear_height_m);
   return {.model = model,
           .steel = *hot.tube,
-          .pressure_per_hoop = 2.0 * tube.thickness_m / column.section.core_width_m(),
-          .hoop_cap_Pa = mid_height_hoop * hot.tube->f_y_Pa,
+          .pressure_per_hoop = 2.0 * tube.thickness_m / core_diameter_m,
+          .hoop_cap_Pa = profile.mid_height_hoop * hot.tube->f_y_Pa,
           .free_hoop_strain = core_expansion - hot.tube->thermal_strain - kShrinkageGapStrain};
 }
 

@@ -30,10 +30,10 @@ struct SectionResponse {
 /// What the tube can do to the core at one time (docs/theory.md, confinement).
 struct TubeGrip {
   ConfinementModel model = ConfinementModel::none;
-  HotSteel steel;                    ///< stress-strain law of the hoop
-  double pressure_per_hoop = 0;      ///< 2 t / D
-  double hoop_cap_Pa = 0;            ///< s_h k_y f_y
-  double free_hoop_strain = 0;       ///< mean thermal strain of the core - that of the tube - gap
+  HotSteel steel;                ///< stress-strain law of the hoop
+  double pressure_per_hoop = 0;  ///< 2 t / D
+  double hoop_cap_Pa = 0;        ///< s_h k_y f_y
+  double free_hoop_strain = 0;   ///< mean thermal strain of the core - that of the tube - gap
 };
 
 /// Gap between tube and core from shrinkage, as a hoop strain (common practice, no source).
@@ -70,8 +70,8 @@ class HotSection {
     HotSteel law;
   };
   struct Lateral {
-    double mean = 0;          ///< area mean of the lateral strain
-    double per_Pa = 0;        ///< its slope in the pressure
+    double mean = 0;    ///< area mean of the lateral strain
+    double per_Pa = 0;  ///< its slope in the pressure
     Eigen::Vector3d per_plane = Eigen::Vector3d::Zero();
   };
 
@@ -93,11 +93,10 @@ class HotSection {
   double largest_strain_ = 0;
 };
 
-/// The grip of the tube under a model, from the materials at one time.
-/// @param mid_height_hoop s_h at mid-height (slip.hpp)
+/// The grip of the tube under a model, from the materials at one time, with the hoop stress that
+/// friction leaves at mid-height (slip.hpp). No grip without a tube.
 [[nodiscard]] TubeGrip tube_grip(const Column& column, ConfinementModel model,
-                                 const FibreLayout& layout, const HotMaterials& hot,
-                                 double mid_height_hoop);
+                                 const FibreLayout& layout, const HotMaterials& hot);
 
 /// Area mean of the thermal strain of the core (concrete fibres).
 [[nodiscard]] double mean_core_expansion(const FibreLayout& layout, const HotMaterials& hot);

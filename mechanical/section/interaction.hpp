@@ -18,7 +18,7 @@ struct InteractionPoint {
 
 struct InteractionDiagram {
   double time_s = 0;
-  Axis axis = Axis::x;  ///< the axis along which the eccentricity is measured
+  Axis axis = Axis::x;                   ///< the axis along which the eccentricity is measured
   std::vector<InteractionPoint> points;  ///< closed: the last joins the first
 };
 

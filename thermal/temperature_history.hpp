@@ -23,8 +23,8 @@ struct Resolution {
 struct HeatFlowStatistics {
   std::size_t cells = 0;
   std::size_t time_steps = 0;
-  double absorbed_J_m = 0;          ///< heat through the surface, per metre of column, whole section
-  double stored_J_m = 0;            ///< gain of enthalpy, whole section
+  double absorbed_J_m = 0;  ///< heat through the surface, per metre of column, whole section
+  double stored_J_m = 0;    ///< gain of enthalpy, whole section
   double energy_balance_error = 0;  ///< |absorbed - stored| / largest absorbed so far
   Symmetry symmetry = Symmetry::none;
 };
@@ -55,7 +55,8 @@ class TemperatureHistory {
   [[nodiscard]] const HeatFlowStatistics& statistics() const;
   [[nodiscard]] const Notices& notices() const;
   [[nodiscard]] double end_s() const;
-  [[nodiscard]] const std::vector<double>& kinks_s() const;  ///< of the fire, within the followed time
+  [[nodiscard]] const std::vector<double>& kinks_s()
+      const;  ///< of the fire, within the followed time
 
   /// Cell temperatures at time t_s in [0, end_s()], one per cell of grid().
   void temperatures_C(double t_s, std::span<double> cells_C) const;

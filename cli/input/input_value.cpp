@@ -11,39 +11,6 @@
 namespace ringward::cli {
 namespace {
 
-std::string quoted_list(const std::vector<std::string>& words) {
-  std::string list;
-  for (const std::string& word : words) {
-    list += (list.empty() ? "\"" : ", \"") + word + "\"";
-  }
-  return list;
-}
-
-std::string expected(const KeySpec& spec) {
-  switch (spec.type) {
-    case KeyType::text:
-      return "text in quotes";
-    case KeyType::choice:
-      return "one of " + quoted_list(spec.choices);
-    case KeyType::number:
-      return "a number";
-    case KeyType::integer:
-      return "a whole number";
-    case KeyType::number_pair:
-      return "two numbers, [a, b]";
-    case KeyType::pair_list:
-      return "a list of pairs, [[a, b], ...]";
-    case KeyType::number_or_pair_list:
-      return "a number or a list of pairs, [[T_C, value], ...]";
-    case KeyType::choice_list:
-      return "a list of " + quoted_list(spec.choices);
-    case KeyType::choice_or_list:
-      return spec.fallback + " or a list of " + quoted_list(spec.choices);
-    default:
-      return "a table";
-  }
-}
-
 /// The checks of one value; problems go to the place of the offending part.
 class ValueCheck {
  public:
@@ -78,7 +45,7 @@ class ValueCheck {
  private:
   InputValue wrong_type(const InputNode& node) {
     const std::string example = spec_.example.empty() ? spec_.fallback : spec_.example;
-    std::string text = fmt::format("expected {}, found {}", expected(spec_), describe(node));
+    std::string text = fmt::format("expected {}, found {}", type_text(spec_), describe(node));
     if (!spec_.unit.empty()) text += fmt::format("; the unit is {}", spec_.unit);
     if (!example.empty()) text += fmt::format("; write e.g. {} = {}", leaf_of(key_), example);
     return refuse(node, text);

@@ -85,4 +85,47 @@ std::string range_text(const KeySpec& spec) {
   return fmt::format("{} to {}", range.low, with_unit(range.high, spec.unit));
 }
 
+std::string default_text(const KeySpec& spec) {
+  if (spec.need == Need::required) {
+    const Condition& condition = spec.only_if;
+    if (condition.key.empty()) return "required";
+    return fmt::format("required for {} = \"{}\"", leaf_of(condition.key), condition.value);
+  }
+  if (!spec.fallback.empty()) return spec.fallback;
+  return spec.computed.empty() ? "none" : spec.computed;
+}
+
+std::string quoted_list(const std::vector<std::string>& words) {
+  std::string list;
+  for (const std::string& word : words) {
+    list += (list.empty() ? "\"" : ", \"") + word + "\"";
+  }
+  return list;
+}
+
+std::string type_text(const KeySpec& spec) {
+  switch (spec.type) {
+    case KeyType::text:
+      return "text in quotes";
+    case KeyType::choice:
+      return "one of " + quoted_list(spec.choices);
+    case KeyType::number:
+      return "a number";
+    case KeyType::integer:
+      return "a whole number";
+    case KeyType::number_pair:
+      return "two numbers, [a, b]";
+    case KeyType::pair_list:
+      return "a list of pairs, [[a, b], ...]";
+    case KeyType::number_or_pair_list:
+      return "a number or a list of pairs, [[T_C, value], ...]";
+    case KeyType::choice_list:
+      return "a list of " + quoted_list(spec.choices);
+    case KeyType::choice_or_list:
+      return spec.fallback + " or a list of " + quoted_list(spec.choices);
+    default:
+      return "a table";
+  }
+}
+
 }  // namespace ringward::cli

@@ -87,4 +87,13 @@ struct KeySpec {
 /// `50 mm to 10000 mm`, `above 0 kN, at most 1000000 kN`; empty when there is no limit.
 [[nodiscard]] std::string range_text(const KeySpec& spec);
 
+/// `required`, the default as a TOML value, or the default in words.
+[[nodiscard]] std::string default_text(const KeySpec& spec);
+
+/// The type in words, e.g. `a whole number`.
+[[nodiscard]] std::string type_text(const KeySpec& spec);
+
+/// `"a", "b"`.
+[[nodiscard]] std::string quoted_list(const std::vector<std::string>& words);
+
 }  // namespace ringward::cli

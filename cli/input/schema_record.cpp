@@ -61,7 +61,7 @@ std::vector<KeySpec> record_keys() {
       record_text("authority", "Invented authority", "Authority that it goes to."),
       {.key = "sensitivity",
        .type = KeyType::ranges_by_key,
-       .example = "{ \"core.moisture_percent\" = [1.5, 10] }",
+       .example = "\"core.moisture_percent\" = [1.5, 10]",
        .help = "Low and high value for each uncertain input, as \"key\" = [low, high]; kept for "
                "the sensitivity study.",
        .advice = "write \"core.moisture_percent\" = [1.5, 10]"},

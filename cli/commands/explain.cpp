@@ -1,0 +1,147 @@
+#include "cli/commands/explain.hpp"
+
+#include <fmt/format.h>
+
+#include <algorithm>
+#include <vector>
+
+#include "cli/input/key_suggestion.hpp"
+#include "cli/input/schema.hpp"
+#include "cli/input/text_wrap.hpp"
+#include "thermal/base/error.hpp"
+
+namespace ringward::cli {
+namespace {
+
+std::string heading_of(const KeySpec& table) {
+  if (table.type != KeyType::table_list) return "[" + table.key + "]";
+  return "[[" + table.key.substr(0, table.key.size() - 2) + "]]";
+}
+
+std::string property(const std::string& name, const std::string& value) {
+  if (value.empty()) return {};
+  constexpr std::size_t kIndent = 11;
+  return fmt::format("  {:<9}{}\n", name, wrapped(value, kIndent, std::string(kIndent, ' ')));
+}
+
+std::string allowed_text(const KeySpec& spec) {
+  std::string text = range_text(spec);
+  if (!text.empty() && (spec.type == KeyType::number_or_pair_list)) text += " (each value)";
+  return text;
+}
+
+std::string explain_leaf(const KeySpec& spec) {
+  std::string text = spec.key + "\n";
+  text += "  " + wrapped(spec.help, 2, "  ") + "\n\n";
+  text += property("type", type_text(spec));
+  text += property("unit", spec.unit);
+  text += property("range", allowed_text(spec));
+  text += property("default", default_text(spec));
+  if (!spec.only_if.key.empty()) {
+    text += property("only for", fmt::format("{} = \"{}\"", spec.only_if.key, spec.only_if.value));
+  }
+  text += property("example", spec.example.empty()
+                                  ? std::string()
+                                  : fmt::format("{} = {}", leaf_of(spec.key), spec.example));
+  text += property("source", spec.source);
+  return text;
+}
+
+std::string listed(const KeySpec& spec) {
+  constexpr std::size_t kIndent = 42;
+  const std::string name = fmt::format("  {:<30} {:<8} ", leaf_of(spec.key), spec.unit);
+  const std::string help =
+      spec.need == Need::required ? spec.help + " (" + default_text(spec) + ")" : spec.help;
+  return name + wrapped(help, name.size(), std::string(kIndent, ' ')) + "\n";
+}
+
+std::string explain_table(const KeySpec& table) {
+  std::string need = table.need == Need::required ? default_text(table) : "optional";
+  std::string text =
+      heading_of(table) + "  (" + need + ")\n  " + wrapped(table.help, 2, "  ") + "\n";
+  if (!table.example.empty()) text += fmt::format("  e.g. {}\n", table.example);
+  for (const KeySpec* spec : keys_in(table.key)) {
+    if (!spec->is_table()) text += listed(*spec);
+  }
+  return text;
+}
+
+std::string explain_all() {
+  std::string text =
+      "Input keys of a column file. `ringward explain KEY` tells range, default and source of "
+      "one.\n"
+      "Lengths mm, strengths MPa, forces kN, moments kNm, temperatures deg C, times min.\n\n";
+  for (const KeySpec* spec : keys_in("")) {
+    if (!spec->is_table()) text += listed(*spec);
+  }
+  for (const KeySpec& spec : input_schema()) {
+    if (spec.is_table()) text += "\n" + explain_table(spec);
+  }
+  return text;
+}
+
+std::string markdown_row(const KeySpec& spec) {
+  std::string allowed = range_text(spec);
+  const bool shows_type = spec.type != KeyType::number && spec.type != KeyType::choice;
+  if (spec.type == KeyType::choice) {
+    allowed = quoted_list(spec.choices);
+  } else if (shows_type) {
+    allowed = type_text(spec) + (allowed.empty() ? "" : "; " + allowed);
+  }
+  return fmt::format("| `{}` | {} | {} | {} | {} | {} |\n", leaf_of(spec.key), spec.unit, allowed,
+                     default_text(spec), spec.help, spec.source);
+}
+
+std::string markdown_rows(const std::string& table) {
+  std::string rows =
+      "| key | unit | allowed | default | meaning | source |\n|---|---|---|---|---|---|\n";
+  for (const KeySpec* spec : keys_in(table)) {
+    if (!spec->is_table()) rows += markdown_row(*spec);
+  }
+  return rows;
+}
+
+std::string markdown_table(const KeySpec& table) {
+  const bool is_needed = table.need == Need::required;
+  std::string text =
+      fmt::format("\n## `{}`\n\n{} {}\n", heading_of(table), table.help,
+                  is_needed ? "This table is " + default_text(table) + "." : "Optional.");
+  if (table.type == KeyType::ranges_by_key) {
+    return text + fmt::format("\nFor example `{}`.\n", table.example);
+  }
+  return text + "\n" + markdown_rows(table.key);
+}
+
+}  // namespace
+
+std::string explain_text(const std::optional<std::string>& key) {
+  if (!key) return explain_all();
+  const std::string spelt = schema_spelling(*key);
+  const KeySpec* spec = find_key(spelt);
+  if (spec == nullptr) {
+    const auto meant = nearest_key(spelt);
+    throw Error(ErrorKind::bad_input, fmt::format("{}: unknown key; {}", *key,
+                                                  meant ? "did you mean " + *meant + "?"
+                                                        : "`ringward explain` lists all keys"));
+  }
+  return spec->is_table() ? explain_table(*spec) : explain_leaf(*spec);
+}
+
+std::string input_reference_markdown() {
+  std::string text =
+      "# Input keys\n\n"
+      "Generated by `ringward explain --markdown` from the program's table of keys; do not "
+      "edit.\n\n"
+      "A column file is TOML. Lengths mm, strengths MPa, forces kN, moments kNm, temperatures\n"
+      "deg C, times min. The origin is the centroid of the section, x to the right, y up, z along\n"
+      "the column. Unknown keys are errors. `--set KEY=VALUE` overrides a key, for example\n"
+      "`--set tube.thickness_mm=6` or `--set bars[0].axis_mm=50`. Sources are keys of\n"
+      "[sources.toml](sources.toml).\n\n";
+  text += markdown_rows("");
+  for (const KeySpec& spec : input_schema()) {
+    if (spec.is_table()) text += markdown_table(spec);
+  }
+  return text;
+}
+
+}  // namespace ringward::cli

@@ -82,11 +82,12 @@ std::vector<NumberPair> parse_fire_points(const std::string& text, const std::st
     if (number == 1 && line.rfind("\xEF\xBB\xBF", 0) == 0) line.erase(0, 3);
     if (stripped(line).empty() || (number == 1 && is_header(line))) continue;
     const std::string mistake = add_point(line, limits, points);
-    if (!mistake.empty()) mistakes.push_back(fmt::format("{}:{}: {}", file_name, number, mistake));
+    if (!mistake.empty())
+      mistakes.push_back(fmt::format("{}:{}: fire.points_csv: {}", file_name, number, mistake));
   }
   if (points.empty() && mistakes.empty()) {
-    mistakes.push_back(
-        fmt::format("{}:1: no points; write time_min,temperature_C on each line", file_name));
+    mistakes.push_back(fmt::format(
+        "{}:1: fire.points_csv: no points; write time_min,temperature_C on each line", file_name));
   }
   return points;
 }

@@ -73,11 +73,13 @@ class NoticeWriter {
 
   void end_gap(const thermal::Tube& tube) {
     if (tube.end_gap_m <= 0) return;
+    const bool is_protected = input_.column.section.protection.has_value();
     add("end-gap-ring", Severity::caution,
-        fmt::format("At each end a ring of concrete {:.4g} mm high stands without the tube: it "
-                    "sees the fire directly and is not confined; its temperatures and strength "
-                    "are not calculated.",
-                    mm_from_m(tube.end_gap_m)),
+        fmt::format("At each end a ring of concrete {:.4g} mm high stands without the tube: it is "
+                    "not confined and sees the fire directly{}; its temperatures and strength are "
+                    "not calculated.",
+                    mm_from_m(tube.end_gap_m),
+                    is_protected ? ", unless the protection covers it" : ""),
         "common practice, no source");
   }
 

@@ -148,6 +148,13 @@ void InputValues::read_range(const InputEntry& entry, Problems& problems) {
                              entry.key));
     return;
   }
+  if (find(entry.key) == nullptr) {
+    problems.add(entry.key_location, key,
+                 fmt::format("\"{}\" names no value of this column; bars are numbered, as in "
+                             "bars[0].axis_mm; correct it or leave it out",
+                             entry.key));
+    return;
+  }
   KeySpec range = *varied;
   range.type = KeyType::number_pair;
   range.example = "[low, high]";

@@ -81,7 +81,7 @@ class CaseFollower {
           continue;
         }
         if (standing == Standing::lost) throw lost_at(to_s);
-        if (standing == Standing::falls) return fall();
+        if (standing == Standing::falls || standing == Standing::jumps) return fall();
         if (eventful && !pass_event(tried)) return false;
         standing_ = std::move(tried);
         break;
@@ -105,8 +105,7 @@ class CaseFollower {
     if (closes_gap(tried)) {
       history_.events.push_back({TubeEventKind::end_gap_closed, tried.time_s()});
       add_sample();
-      tried.close_gap();
-      const Standing after = move(tried, tried.time_s());
+      const Standing after = tried.close_gap(*in_time_.at(tried.time_s()));
       if (after == Standing::lost) throw lost_at(tried.time_s());
       if (after == Standing::falls) {
         history_.fell_with_gap = true;

@@ -58,15 +58,31 @@ Standing StandingColumn::load_cold(const HotMaterials& cold) {
   return settle(*there);
 }
 
-Standing StandingColumn::move_to(const HotMaterials& hot) {
-  build(hot);
+Standing StandingColumn::settle_near(const Eigen::VectorXd& before) {
   // Forces are scaled by the plastic resistance, which changes with time.
-  Eigen::VectorXd guess = stance_.point.q;
+  Eigen::VectorXd guess = before;
   guess(guess.size() - 1) = model_->scaled_N(fixed_->load_N);
   const EquilibriumPath path(*model_);
   const std::optional<PathPoint> near = path.project(guess, stance_.point.tangent);
-  if (!near) return Standing::lost;
-  return settle(*near);
+  return near ? settle(*near) : Standing::lost;
+}
+
+Standing StandingColumn::move_to(const HotMaterials& hot) {
+  const Eigen::VectorXd before = stance_.point.q;
+  build(hot);
+  const Standing standing = settle_near(before);
+  if (standing != Standing::stands) return standing;
+  const Eigen::Index strains = before.size() - 1;
+  const double moved =
+      (stance_.point.q.head(strains) - before.head(strains)).lpNorm<Eigen::Infinity>();
+  return moved > kLargestMove ? Standing::jumps : Standing::stands;
+}
+
+Standing StandingColumn::close_gap(const HotMaterials& hot) {
+  gap_closed_ = true;
+  const Eigen::VectorXd before = stance_.point.q;
+  build(hot);
+  return settle_near(before);
 }
 
 PathPoint StandingColumn::limit() const {

@@ -25,7 +25,13 @@ struct Stance {
   double gap_closure_m = 0;  ///< of both end gaps together; closed at 2 end_gap
 };
 
-enum class Standing { stands, falls, lost };
+/// `jumps`: the nearest equilibrium under the load is farther away than one step may move; `lost`:
+/// the solver found none. Both call for a shorter step; what still jumps then is no longer the
+/// equilibrium that the column stood on.
+enum class Standing { stands, falls, jumps, lost };
+
+/// Largest change of a scaled strain or curvature (0.1 %) in one step of time.
+inline constexpr double kLargestMove = 0.3;
 
 /// Follows the equilibrium of one column, at constant load, from one time to the next. A copy is
 /// cheap, so that a step can be tried and thrown away.
@@ -36,15 +42,15 @@ class StandingColumn {
   /// Loads the cold column. `falls` when the load exceeds the cold capacity.
   [[nodiscard]] Standing load_cold(const HotMaterials& cold);
 
-  /// Moves on to another time; `lost` when the step was too long for the solver.
+  /// Moves on to another time.
   [[nodiscard]] Standing move_to(const HotMaterials& hot);
+  /// At the present time, from now on without the tube (its end gaps have closed). The state may
+  /// move far: only the loss of equilibrium is a fall.
+  [[nodiscard]] Standing close_gap(const HotMaterials& hot);
 
   [[nodiscard]] const Stance& stance() const { return stance_; }
   [[nodiscard]] double time_s() const { return time_s_; }
   [[nodiscard]] bool gap_closed() const { return gap_closed_; }
-  /// From now on the tube no longer confines (model contact only).
-  void close_gap() { gap_closed_ = true; }
-
   /// The limit point ahead of the present equilibrium: the member's capacity.
   [[nodiscard]] PathPoint limit() const;
   /// The largest force over all strains ahead of the present equilibrium.
@@ -55,6 +61,7 @@ class StandingColumn {
  private:
   void build(const HotMaterials& hot);
   [[nodiscard]] Standing settle(const PathPoint& from);
+  [[nodiscard]] Standing settle_near(const Eigen::VectorXd& before);
 
   const StandingCase* fixed_;
   std::shared_ptr<const HotSection> section_;

@@ -14,6 +14,7 @@ constexpr int kNewtonLimit = 12;
 constexpr double kFirstStep = 0.05;
 constexpr double kLargestStep = 0.5;  // 0.05 % strain: far below the distance between two peaks
 constexpr double kSmallestStep = 1e-7;
+constexpr double kSmallestWidth = 1e-9;
 constexpr double kForceTolerance = 1e-8;
 constexpr double kCrushedStrain = 0.06;  // beyond eps_cu1 of any temperature
 constexpr int kWalkLimit = 4000;
@@ -120,27 +121,33 @@ EquilibriumPath::Walk EquilibriumPath::walk_to_force(const PathPoint& from, doub
   throw path_lost("the applied force is not reached");
 }
 
-// The slope of N along the path falls through zero between `before` and `before` + step.
+// The slope of N along the path falls through zero between `before` and `before` + step. The base
+// moves up with every rising point, so that sharp turns of the path stay within reach.
 PathPoint EquilibriumPath::refine_maximum(const PathPoint& before, double step) const {
+  PathPoint base = before;
   PathPoint best = before;
-  double low = 0.0;
-  double high = step;
-  double low_slope = before.N_slope();
-  double high_slope = 0.0;
-  for (int iteration = 0; iteration < 60; ++iteration) {
-    double at = 0.5 * (low + high);
-    if (iteration > 0 && iteration % 3 != 0 && high_slope < 0.0) {
-      at = low + (high - low) * low_slope / (low_slope - high_slope);
-      at = std::clamp(at, low + 0.02 * (high - low), high - 0.02 * (high - low));
+  double width = step;
+  double falling_slope = 0.0;  // unknown until a falling point is met
+  for (int iteration = 0; iteration < 80 && width > kSmallestWidth; ++iteration) {
+    double share = 0.5;
+    if (falling_slope < 0.0 && iteration % 3 != 0) {
+      share = std::clamp(base.N_slope() / (base.N_slope() - falling_slope), 0.02, 0.98);
     }
-    const std::optional<PathPoint> point = project(before.q + at * before.tangent, before.tangent);
-    if (!point) throw path_lost("no equilibrium next to a maximum");
-    if (point->scaled_N() > best.scaled_N()) best = *point;
-    (point->N_slope() > 0.0 ? low : high) = at;
-    (point->N_slope() > 0.0 ? low_slope : high_slope) = point->N_slope();
+    const std::optional<PathPoint> point =
+        project(base.q + share * width * base.tangent, base.tangent);
+    const bool reached = point && point->tangent.dot(base.tangent) > 0.5;
+    if (reached && point->scaled_N() > best.scaled_N()) best = *point;
+    if (reached && point->N_slope() > 0.0) {
+      base = *point;
+      width *= 1.0 - share;
+    } else {
+      width *= share;
+      falling_slope = reached ? point->N_slope() : 0.0;
+    }
     // The force is within slope x width of the maximum.
-    const double remaining = (high - low) * std::max(low_slope, -high_slope);
-    if (high_slope < 0.0 && remaining < kForceTolerance) break;
+    if (falling_slope < 0.0 && width * std::max(base.N_slope(), -falling_slope) < kForceTolerance) {
+      break;
+    }
   }
   return best;
 }

@@ -8,6 +8,9 @@
 namespace ringward::mechanical {
 namespace {
 
+/// Above this utilisation the capacity is sampled at every search time.
+constexpr double kCloseToLimit = 0.7;
+
 /// One case on its way through the fire.
 class CaseFollower {
  public:
@@ -19,6 +22,7 @@ class CaseFollower {
     for (const double t_s : sample_s) {
       if (t_s > until_s) break;
       if (!go_to(t_s)) break;
+      if (!wants_sample(t_s)) continue;
       add_sample();
       if (dips_between_samples() && !recheck_dip()) break;
     }
@@ -133,17 +137,23 @@ class CaseFollower {
     return false;
   }
 
-  /// Largest axial force at zero curvature, coarsely: only to name what governs.
+  /// First maximum of the axial force at zero curvature, coarsely: only to name what governs.
   [[nodiscard]] double section_N() const {
     const HotSection& section = standing_.section();
+    const double step = (0.02 - section.least_strain()) / 200;
     double largest = 0.0;
-    constexpr int kCount = 200;
-    for (int k = 0; k <= kCount; ++k) {
-      const double share = static_cast<double>(k) / kCount;
-      const double eps = section.least_strain() + share * (0.02 - section.least_strain());
-      largest = std::max(largest, section.axial_force_N(eps));
+    for (int k = 0; k <= 200; ++k) {
+      const double force = section.axial_force_N(section.least_strain() + k * step);
+      if (force < largest) break;
+      largest = force;
     }
     return largest;
+  }
+
+  /// Far below the capacity only the times of the printed history are sampled.
+  [[nodiscard]] bool wants_sample(double t_s) const {
+    if (is_history_time(t_s) || history_.samples.empty()) return true;
+    return fixed_.load_N > kCloseToLimit * history_.samples.back().capacity_N;
   }
 
   void add_sample() {

@@ -10,6 +10,8 @@
 namespace ringward::mechanical {
 namespace {
 
+constexpr double kPressureTolerance = 1e-10;  // of the pressure at yield
+
 /// Adds one fibre of given stress and tangent to the section forces.
 inline void add_fibre(SectionResponse& sum, double u, double v, double force, double stiffness) {
   sum.N_N += force;
@@ -112,53 +114,62 @@ void HotSection::add_steel(const StrainPlane& plane, SectionResponse& sum) const
 // own.
 HotSection::Lateral HotSection::lateral_strain(const StrainPlane& plane, double p_Pa) const {
   const LateralStrainCurve& curve = lateral_strain_curve();
-  Lateral result;
+  double mean = 0.0, per_Pa = 0.0, per_eps0 = 0.0, per_u = 0.0, per_v = 0.0;
   for (const Concrete& c : concrete_) {
-    if (c.area <= 0.0) continue;
     const double eps = plane.eps0 + plane.kappa_u_1_m * c.u + plane.kappa_v_1_m * c.v + c.eps_th;
-    if (eps <= 0.0) continue;
+    if (c.area <= 0.0 || eps <= 0.0) continue;
     const double pressure_factor = 1.0 + 8.0 * p_Pa / c.lateral_f;
     const double scale = 0.85 * pressure_factor;
     const double z = eps / (c.eps_c1 * scale);
     const LateralStrainCurve::Ratio ratio = curve.inverse(z);
-    result.mean += c.area * ratio.y * c.eps_c1;
-    result.per_Pa -= c.area * c.eps_c1 * ratio.slope * z * 8.0 / (c.lateral_f * pressure_factor);
+    mean += c.area * ratio.y * c.eps_c1;
+    per_Pa -= c.area * c.eps_c1 * ratio.slope * z * 8.0 / (c.lateral_f * pressure_factor);
     const double per_eps = c.area * ratio.slope / scale;
-    result.per_plane += per_eps * Eigen::Vector3d(1.0, c.u, c.v);
+    per_eps0 += per_eps;
+    per_u += per_eps * c.u;
+    per_v += per_eps * c.v;
   }
-  result.mean /= area_m2_;
-  result.per_Pa /= area_m2_;
-  result.per_plane /= area_m2_;
-  return result;
+  return {.mean = mean / area_m2_,
+          .per_Pa = per_Pa / area_m2_,
+          .per_plane = Eigen::Vector3d(per_eps0, per_u, per_v) / area_m2_};
 }
 
-// g(p) = (2 t / D) sigma_h(e_h(p)) - p falls with p, because pressure holds the lateral strain
-// back: one root in [0, p at the cap], found by Newton inside a shrinking bracket.
+HotSection::PressureGap HotSection::pressure_gap(const StrainPlane& plane, double p_Pa) const {
+  const Lateral lateral = lateral_strain(plane, p_Pa);
+  const double hoop_strain = lateral.mean + grip_.free_hoop_strain;
+  const StressAndTangent hoop = steel_stress(grip_.steel, std::max(0.0, hoop_strain));
+  const bool capped = hoop.stress_Pa >= grip_.hoop_cap_Pa;
+  const bool follows = hoop_strain > 0.0 && !capped;
+  const double gain = follows ? grip_.pressure_per_hoop * hoop.tangent_Pa : 0.0;
+  const double made_Pa = grip_.pressure_per_hoop * std::min(hoop.stress_Pa, grip_.hoop_cap_Pa);
+  const double slope = gain * lateral.per_Pa - 1.0;
+  return {
+      .value_Pa = made_Pa - p_Pa, .slope = slope, .per_plane = -gain / slope * lateral.per_plane};
+}
+
+// The gap between the pressure that the tube makes and p falls with p, because pressure holds the
+// lateral strain back: one root in [0, p at the cap], found by Newton inside a shrinking bracket.
 double HotSection::solve_pressure(const StrainPlane& plane, Eigen::Vector3d& slope) const {
   slope.setZero();
   const double p_cap = grip_.pressure_per_hoop * grip_.hoop_cap_Pa;
   if (grip_.model == ConfinementModel::yield) return p_cap;
   if (p_cap <= 0.0) return 0.0;
-  Lateral lateral = lateral_strain(plane, 0.0);
-  if (lateral.mean + grip_.free_hoop_strain <= 0.0) return 0.0;
   double low = 0.0;
   double high = p_cap;
-  double p = p_cap;
+  double p = 0.0;
   for (int iteration = 0; iteration < 80; ++iteration) {
-    lateral = lateral_strain(plane, p);
-    const StressAndTangent hoop =
-        steel_stress(grip_.steel, std::max(0.0, lateral.mean + grip_.free_hoop_strain));
-    if (p >= p_cap && hoop.stress_Pa >= grip_.hoop_cap_Pa) return p_cap;
-    const double g = grip_.pressure_per_hoop * std::min(hoop.stress_Pa, grip_.hoop_cap_Pa) - p;
-    const bool gripping =
-        lateral.mean + grip_.free_hoop_strain > 0.0 && hoop.stress_Pa < grip_.hoop_cap_Pa;
-    const double gain = gripping ? grip_.pressure_per_hoop * hoop.tangent_Pa : 0.0;
-    const double g_slope = gain * lateral.per_Pa - 1.0;
-    (g > 0.0 ? low : high) = p;
-    slope = -gain * lateral.per_plane / g_slope;
-    double next = p - g / g_slope;
-    if (!(next > low && next < high)) next = 0.5 * (low + high);
-    if (std::abs(next - p) <= 1e-11 * p_cap) return next;
+    const PressureGap gap = pressure_gap(plane, p);
+    if (p == 0.0 && gap.value_Pa <= 0.0) return 0.0;
+    if (p == p_cap && gap.value_Pa >= 0.0) return p_cap;
+    slope = gap.per_plane;
+    (gap.value_Pa > 0.0 ? low : high) = p;
+    double next = p - gap.value_Pa / gap.slope;
+    if (next >= p_cap && high == p_cap && low < p_cap && p < p_cap) {
+      next = p_cap;
+    } else if (!(next > low && next < high)) {
+      next = 0.5 * (low + high);
+    }
+    if (std::abs(next - p) <= kPressureTolerance * p_cap) return next;
     p = next;
   }
   return p;

@@ -75,6 +75,14 @@ class HotSection {
     Eigen::Vector3d per_plane = Eigen::Vector3d::Zero();
   };
 
+  /// Pressure that the tube makes when pressed by `p`, less p, and its slopes.
+  struct PressureGap {
+    double value_Pa = 0;
+    double slope = -1;
+    Eigen::Vector3d per_plane = Eigen::Vector3d::Zero();  ///< of the root, not of the gap
+  };
+  [[nodiscard]] PressureGap pressure_gap(const StrainPlane& plane, double p_Pa) const;
+
   void add_concrete(const StrainPlane& plane, double p_Pa, SectionResponse& sum,
                     Eigen::Vector3d& per_Pa) const;
   void add_unconfined(const StrainPlane& plane, SectionResponse& sum) const;

@@ -39,16 +39,18 @@ std::string how_to_add(const KeySpec& spec, const std::string& table) {
   return fmt::format("add e.g. {} = {}{} to [{}]", leaf_of(spec.key), value, unit, table);
 }
 
-void report_missing(const KeySpec& spec, const std::string& table, const Location& where,
-                    Problems& problems) {
-  problems.add(where, joined(table, file_leaf(spec)), "missing; " + how_to_add(spec, table));
-}
-
 }  // namespace
 
 InputValues::InputValues(const InputNode& root, Problems& problems) {
   read_table(root, "", "", problems);
   check_conditions(problems);
+}
+
+void InputValues::report_missing(const KeySpec& spec, const std::string& table,
+                                 Problems& problems) const {
+  const std::string key = joined(table, file_leaf(spec));
+  if (misspelt_.count(key) > 0) return;
+  problems.add(location(table), key, "missing; " + how_to_add(spec, table));
 }
 
 void InputValues::add(Entry entry) {
@@ -73,7 +75,7 @@ void InputValues::read_table(const InputNode& node, const std::string& schema_ta
       continue;
     }
     const bool always = spec->need == Need::required && spec->only_if.key.empty();
-    if (always) report_missing(*spec, table, node.location, problems);
+    if (always) report_missing(*spec, table, problems);
     add({spec, key, default_value(*spec), node.location, false});
   }
 }
@@ -89,7 +91,7 @@ void InputValues::read_subtable(const KeySpec& spec, const InputNode& parent,
       empty.location = parent.location;
       read_table(empty, spec.key, key, problems);
     } else if (spec.need == Need::required && spec.only_if.key.empty()) {
-      report_missing(spec, table, parent.location, problems);
+      report_missing(spec, table, problems);
     }
     return;
   }
@@ -171,12 +173,15 @@ void InputValues::read_range(const InputEntry& entry, Problems& problems) {
 }
 
 void InputValues::report_unknown(const InputNode& node, const std::string& schema_table,
-                                 const std::string& table, Problems& problems) const {
+                                 const std::string& table, Problems& problems) {
   for (const InputEntry& entry : node.entries) {
     if (find_in(schema_table, entry.key) != nullptr) continue;
     const auto meant = nearest_key(joined(schema_table, entry.key));
     std::string way_out = "remove it, or see `ringward explain`";
-    if (meant) way_out = fmt::format("did you mean {}?", *meant);
+    if (meant) {
+      way_out = fmt::format("did you mean {}?", *meant);
+      misspelt_.insert(joined(table, leaf_of(*meant)));
+    }
     problems.add(entry.key_location, joined(table, entry.key), "unknown key; " + way_out);
   }
 }
@@ -190,11 +195,12 @@ void InputValues::check_conditions(Problems& problems) const {
     const bool holds = actual == condition.value;
     const bool is_given = spec.is_table() ? has_table(spec.key) : given(spec.key);
     if (is_given && !holds) {
-      problems.add(location(spec.key), spec.key,
-                   fmt::format("belongs to {} = \"{}\", but {} is \"{}\"; remove one of the two",
-                               condition.key, condition.value, condition.key, actual));
+      problems.add(
+          location(spec.key), spec.key,
+          fmt::format("belongs to {} = \"{}\", but {} is \"{}\"; remove it or change {}",
+                      condition.key, condition.value, condition.key, actual, condition.key));
     } else if (!is_given && holds && spec.need == Need::required) {
-      report_missing(spec, table_of(spec.key), location(table_of(spec.key)), problems);
+      report_missing(spec, table_of(spec.key), problems);
     }
   }
 }

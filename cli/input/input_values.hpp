@@ -1,6 +1,7 @@
 #pragma once
 
 #include <map>
+#include <set>
 #include <string>
 #include <vector>
 
@@ -61,7 +62,8 @@ class InputValues {
   void read_sensitivity(const InputEntry& entry, Problems& problems);
   void read_range(const InputEntry& entry, Problems& problems);
   void report_unknown(const InputNode& node, const std::string& schema_table,
-                      const std::string& table, Problems& problems) const;
+                      const std::string& table, Problems& problems);
+  void report_missing(const KeySpec& spec, const std::string& table, Problems& problems) const;
   void check_conditions(Problems& problems) const;
   void add(Entry entry);
   [[nodiscard]] const Entry* find(const std::string& key) const;
@@ -70,6 +72,7 @@ class InputValues {
   std::map<std::string, std::size_t> index_;
   std::map<std::string, Location> tables_;
   std::map<std::string, std::size_t> groups_;
+  std::set<std::string> misspelt_;  ///< keys that an unknown key was probably meant to be
   std::vector<SensitivityRange> sensitivity_;
 };
 

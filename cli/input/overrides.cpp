@@ -117,9 +117,9 @@ void relocate(InputNode& node, const Location& location) {
 }
 
 bool is_bare_word(const std::string& value) {
-  const bool has_letter =
-      std::any_of(value.begin(), value.end(), [](unsigned char c) { return std::isalpha(c) != 0; });
-  return has_letter && std::all_of(value.begin(), value.end(), [](char c) {
+  const bool starts_with_letter =
+      !value.empty() && std::isalpha(static_cast<unsigned char>(value.front())) != 0;
+  return starts_with_letter && std::all_of(value.begin(), value.end(), [](char c) {
            return is_bare(c) || c == '.' || c == ' ' || c == '/';
          });
 }
@@ -137,10 +137,12 @@ std::optional<InputNode> parse_value(const Assignment& assignment, Problems& pro
     relocate(node, location);
     return node;
   } catch (const Error&) {
-    const std::string advice =
-        is_bare_word(value)
-            ? fmt::format("text needs quotes: --set '{}=\"{}\"'", assignment.key, value)
-            : std::string("write a number, \"text\" or [a list]");
+    std::string advice = "write a number, \"text\" or [a list]";
+    if (is_bare_word(value)) {
+      advice = fmt::format("text needs quotes: --set '{}=\"{}\"'", assignment.key, value);
+    } else if (!value.empty() && value.front() >= '0' && value.front() <= '9') {
+      advice = "write the number alone, without its unit";
+    }
     problems.add(
         location, assignment.key,
         fmt::format("{} is not a TOML value; {}", value.empty() ? "nothing" : value, advice));
@@ -158,8 +160,10 @@ class Setter {
   bool set(InputNode& root, const std::vector<Step>& steps, InputNode value) {
     InputNode* node = &root;
     std::string done;
-    for (const Step& step : steps) {
-      node = step.is_index ? element(*node, step, done) : member(*node, step, done);
+    for (std::size_t i = 0; i < steps.size(); ++i) {
+      const bool before_index = i + 1 < steps.size() && steps[i + 1].is_index;
+      node = steps[i].is_index ? element(*node, steps[i], done)
+                               : member(*node, steps[i], before_index, done);
       if (node == nullptr) return false;
     }
     *node = std::move(value);
@@ -185,7 +189,7 @@ class Setter {
     return &node.items[step.index];
   }
 
-  InputNode* member(InputNode& node, const Step& step, std::string& done) {
+  InputNode* member(InputNode& node, const Step& step, bool is_list, std::string& done) {
     if (node.kind == NodeKind::list) {
       return refuse(fmt::format("{} is a list of {}; name the element, as in {}[0].{}", done,
                                 node.items.size(), done, step.key));
@@ -197,6 +201,7 @@ class Setter {
     if (InputEntry* entry = node.find(step.key)) return &entry->value;
     InputEntry added{step.key, location_, {}};
     added.value.location = location_;
+    added.value.kind = is_list ? NodeKind::list : NodeKind::table;
     node.entries.push_back(std::move(added));
     return &node.entries.back().value;
   }

@@ -29,8 +29,11 @@ double depth_in_core_m(const Section& section, const Point& point) {
                   section.core_depth_m() / 2 - std::abs(point.y_m));
 }
 
+/// In mm without the rounding of sines and cosines.
+double clean_mm(double length_m) { return std::round(mm_from_m(length_m) * 1e6) / 1e6 + 0.0; }
+
 std::string at_mm(const Point& point) {
-  return fmt::format("({:.6g}, {:.6g}) mm", mm_from_m(point.x_m), mm_from_m(point.y_m));
+  return fmt::format("({:.6g}, {:.6g}) mm", clean_mm(point.x_m), clean_mm(point.y_m));
 }
 
 class SectionChecks {
@@ -154,7 +157,7 @@ class SectionChecks {
       return refuse(placing_key(group),
                     fmt::format("the bar at {} overlaps the steel shape: {:.4g} mm from its axis "
                                 "to the steel, at least {:.6g} mm needed; move one of them",
-                                at_mm(bar), mm_from_m(distance_m), mm_from_m(radius_m)));
+                                at_mm(bar), clean_mm(distance_m), mm_from_m(radius_m)));
     }
   }
 

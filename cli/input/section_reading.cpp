@@ -155,7 +155,8 @@ class BarReader {
     const BarRectangle rectangle{section_.core_width_m() / 2 - axis_m,
                                  section_.core_depth_m() / 2 - axis_m};
     const double least_m = std::min(rectangle.half_width_m, rectangle.half_depth_m);
-    if (std::isnan(least_m)) return {};
+    // A tube that leaves no core is reported by itself.
+    if (std::isnan(least_m) || least_m + axis_m <= 0) return {};
     if (least_m <= 0) {
       refuse("axis_mm",
              fmt::format("{:.6g} mm reaches the centre of the core or beyond; it must be below "

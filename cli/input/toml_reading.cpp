@@ -101,8 +101,9 @@ InputNode parse_toml(const std::string& text, const std::string& name) {
   } catch (const toml::parse_error& error) {
     const auto& at = error.source().begin;
     throw Error(ErrorKind::bad_input,
-                fmt::format("{}:{}:{}: not valid TOML: {}", name, std::max<unsigned>(at.line, 1),
-                            std::max<unsigned>(at.column, 1), std::string(error.description())));
+                fmt::format("{}:{}:{}: not valid TOML: {}; correct the syntax here", name,
+                            std::max<unsigned>(at.line, 1), std::max<unsigned>(at.column, 1),
+                            std::string(error.description())));
   }
 }
 

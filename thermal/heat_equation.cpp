@@ -1,6 +1,8 @@
 #include "thermal/heat_equation.hpp"
 
 #include <algorithm>
+#include <cmath>
+#include <limits>
 #include <map>
 #include <numeric>
 #include <utility>
@@ -26,18 +28,7 @@ std::vector<MaterialShare> shares_of(const HeatProblem& problem, const Cell& cel
   return {{law, 1.0 - cell.steel_fraction}, {problem.steel_shape, cell.steel_fraction}};
 }
 
-constexpr Side opposite(Side side) {
-  switch (side) {
-    case Side::low_1:
-      return Side::high_1;
-    case Side::high_1:
-      return Side::low_1;
-    case Side::low_2:
-      return Side::high_2;
-    default:
-      return Side::low_2;
-  }
-}
+constexpr double kUnknown = std::numeric_limits<double>::quiet_NaN();
 
 }  // namespace
 
@@ -45,16 +36,11 @@ HeatEquation::HeatEquation(HeatProblem problem) : problem_(std::move(problem)) {
   assign_curves();
   connect();
   build_pattern();
-  for (InnerFace& face : inner_) face.entries = pair_entries(face.a, face.b);
-  for (Interface& face : interfaces_) face.entries = pair_entries(face.a, face.b);
-  for (SurfaceFace& face : surface_) face.entry = entry(face.cell, face.cell);
-  peaks_.assign(size(), 0.0);
-  dried_shift_.assign(size(), 0.0);
+  find_entries();
   states_.resize(size());
   outside_C_.resize(problem_.conditions.size());
-  const std::vector<double> start = initial_state();
-  peaks_.assign(size(), -1e300);
-  note_peaks(start);
+  peaks_ = initial_state();
+  dried_shift_.assign(size(), kUnknown);
 }
 
 void HeatEquation::assign_curves() {
@@ -65,7 +51,6 @@ void HeatEquation::assign_curves() {
     const auto [found, is_new] = known.try_emplace(key, curves_.size());
     if (is_new) curves_.emplace_back(shares_of(problem_, cell));
     curve_of_cell_.push_back(found->second);
-    may_dry_.push_back(curves_[found->second].dries() ? 1 : 0);
     weight_.push_back(1.0 / (cell.area_m2 * kEnthalpyUnit_J_m3));
   }
 }
@@ -117,19 +102,37 @@ void HeatEquation::connect() {
   }
 }
 
+/// Parabola through the face (0) and two cells at d1 and d2:
+/// gradient = -(1/d1 + 1/d2) P_f + d2/(d1 (d2 - d1)) P_1 - d1/(d2 (d2 - d1)) P_2.
+HeatEquation::FaceStencil HeatEquation::stencil(CellIndex at, Side side) const {
+  const std::size_t near = grid().index(at.i, at.j);
+  const double d1 = half_distance_m(grid(), at, side);
+  FaceStencil face{near, near, {&curve(near), 1.0 / d1}, 1.0 / d1, 0.0};
+  const std::optional<CellIndex> next = neighbour(at, opposite(side));
+  if (!next) return face;
+  const std::size_t far = grid().index(next->i, next->j);
+  if (&curve(far) != &curve(near) || far == near) return face;
+  const double d2 = 2.0 * d1 + half_distance_m(grid(), *next, side);
+  face.far = far;
+  face.side.face_weight_1_m = 1.0 / d1 + 1.0 / d2;
+  face.near_weight_1_m = d2 / (d1 * (d2 - d1));
+  face.far_weight_1_m = -d1 / (d2 * (d2 - d1));
+  return face;
+}
+
 void HeatEquation::connect_pair(CellIndex at, Side side) {
   const std::optional<CellIndex> other = neighbour(at, side);
   if (!other) return;
   const std::size_t a = grid().index(at.i, at.j);
   const std::size_t b = grid().index(other->i, other->j);
   const double length = face_length_m(grid(), at, side);
-  const HalfCell half_a{&curve(a), half_distance_m(grid(), at, side)};
-  const HalfCell half_b{&curve(b), half_distance_m(grid(), *other, opposite(side))};
-  const double resistance = resistance_m2K_W(a, b);
-  if (half_a.curve == half_b.curve) {
-    inner_.push_back({a, b, length / (half_a.distance_m + half_b.distance_m), {}});
+  if (&curve(a) == &curve(b)) {
+    const double distance =
+        half_distance_m(grid(), at, side) + half_distance_m(grid(), *other, side);
+    inner_.push_back({a, b, length / distance, {}});
   } else {
-    interfaces_.push_back({a, b, half_a, half_b, length, resistance, {}});
+    interfaces_.push_back(
+        {stencil(at, side), stencil(*other, opposite(side)), length, resistance_m2K_W(a, b), {}});
   }
 }
 
@@ -137,25 +140,26 @@ void HeatEquation::connect_surface(CellIndex at, Side side) {
   const SurfaceCondition* seen = condition(at, side);
   const double length = face_length_m(grid(), at, side);
   if (seen == nullptr || length == 0.0) return;
-  const std::size_t cell = grid().index(at.i, at.j);
   const auto which = static_cast<std::size_t>(seen - problem_.conditions.data());
-  surface_.push_back({cell,
-                      {&curve(cell), half_distance_m(grid(), at, side)},
-                      length,
-                      which,
-                      face_point(grid(), at, side),
-                      0});
+  surface_.push_back({stencil(at, side), length, which, face_point(grid(), at, side), {}});
 }
 
 void HeatEquation::build_pattern() {
   std::vector<std::vector<int>> columns(size());
-  for (std::size_t k = 0; k < size(); ++k) columns[k].push_back(static_cast<int>(k));
-  const auto join = [&](std::size_t a, std::size_t b) {
-    columns[a].push_back(static_cast<int>(b));
-    columns[b].push_back(static_cast<int>(a));
+  const auto add = [&](std::size_t row, std::size_t column) {
+    columns[column].push_back(static_cast<int>(row));
   };
-  for (const InnerFace& face : inner_) join(face.a, face.b);
-  for (const Interface& face : interfaces_) join(face.a, face.b);
+  for (std::size_t k = 0; k < size(); ++k) add(k, k);
+  for (const InnerFace& face : inner_) {
+    add(face.a, face.b);
+    add(face.b, face.a);
+  }
+  for (const Interface& face : interfaces_) {
+    for (std::size_t column : {face.a.near, face.a.far, face.b.near, face.b.far}) {
+      add(face.a.near, column);
+      add(face.b.near, column);
+    }
+  }
   pattern_.column_starts.push_back(0);
   for (std::vector<int>& rows : columns) {
     std::sort(rows.begin(), rows.end());
@@ -165,15 +169,27 @@ void HeatEquation::build_pattern() {
   }
 }
 
+void HeatEquation::find_entries() {
+  for (InnerFace& f : inner_) {
+    f.entries = {entry(f.a, f.a), entry(f.b, f.a), entry(f.a, f.b), entry(f.b, f.b)};
+  }
+  for (Interface& f : interfaces_) {
+    std::size_t k = 0;
+    for (std::size_t column : {f.a.near, f.a.far, f.b.near, f.b.far}) {
+      f.entries[k++] = entry(f.a.near, column);
+      f.entries[k++] = entry(f.b.near, column);
+    }
+  }
+  for (SurfaceFace& f : surface_) {
+    f.entries = {entry(f.in.near, f.in.near), entry(f.in.near, f.in.far)};
+  }
+}
+
 std::size_t HeatEquation::entry(std::size_t row, std::size_t column) const {
   const auto first = pattern_.rows.begin() + pattern_.column_starts[column];
   const auto last = pattern_.rows.begin() + pattern_.column_starts[column + 1];
   const auto found = std::lower_bound(first, last, static_cast<int>(row));
   return static_cast<std::size_t>(found - pattern_.rows.begin());
-}
-
-std::array<std::size_t, 4> HeatEquation::pair_entries(std::size_t a, std::size_t b) const {
-  return {entry(a, a), entry(b, a), entry(a, b), entry(b, b)};
 }
 
 std::vector<double> HeatEquation::initial_state() const {
@@ -197,18 +213,25 @@ void HeatEquation::note_peaks(std::span<const double> u) {
   for (std::size_t k = 0; k < u.size(); ++k) {
     if (!(u[k] > peaks_[k])) continue;
     peaks_[k] = u[k];
-    if (may_dry_[k] == 0) continue;
-    const double peak_C = curve(k).first_heating(u[k]).T_C;
-    dried_shift_[k] = curve(k).dried_enthalpy(peak_C) - u[k];
+    dried_shift_[k] = kUnknown;
   }
 }
 
-void HeatEquation::update_states(std::span<const double> u) {
-  for (std::size_t k = 0; k < u.size(); ++k) {
-    const EnthalpyCurve& of_cell = curve(k);
-    states_[k] = u[k] >= peaks_[k] || may_dry_[k] == 0 ? of_cell.first_heating(u[k])
-                                                       : of_cell.dried(u[k] + dried_shift_[k]);
+void HeatEquation::update_state(std::size_t cell, double u) {
+  const EnthalpyCurve& of_cell = curve(cell);
+  if (u >= peaks_[cell] || !of_cell.dries()) {
+    states_[cell] = of_cell.first_heating(u);
+    return;
   }
+  double& shift = dried_shift_[cell];
+  if (std::isnan(shift)) {
+    shift = of_cell.dried_enthalpy(of_cell.first_heating(peaks_[cell]).T_C) - peaks_[cell];
+  }
+  states_[cell] = of_cell.dried(u + shift);
+}
+
+void HeatEquation::update_states(std::span<const double> u) {
+  for (std::size_t k = 0; k < u.size(); ++k) update_state(k, u[k]);
 }
 
 void HeatEquation::update_outside(double t_s) {
@@ -223,11 +246,17 @@ double HeatEquation::outside_C(const SurfaceCondition& condition, const Point& p
   return condition.T_C_at ? condition.T_C_at(t_s, point.x_m, point.y_m) : condition.T_C(t_s);
 }
 
-FaceFlow HeatEquation::flow(const SurfaceFace& face, double t_s) const {
+SurfaceFlow HeatEquation::flow(const SurfaceFace& face, double t_s) const {
   const SurfaceCondition& seen = problem_.conditions[face.condition];
   const double outside =
       seen.T_C_at ? seen.T_C_at(t_s, face.point.x_m, face.point.y_m) : outside_C_[face.condition];
-  return surface_flow(face.half, states_[face.cell], seen, outside);
+  return surface_flow(face.in.side, inner_W_m2(face.in), seen, outside, states_[face.in.near].T_C);
+}
+
+InterfaceFlow HeatEquation::flow(const Interface& face) const {
+  return interface_flow({face.a.side, inner_W_m2(face.a), states_[face.a.near].T_C},
+                        {face.b.side, inner_W_m2(face.b), states_[face.b.near].T_C},
+                        face.resistance_m2K_W);
 }
 
 void HeatEquation::rate(double t_s, std::span<const double> u, std::span<double> du_dt) {
@@ -240,13 +269,11 @@ void HeatEquation::rate(double t_s, std::span<const double> u, std::span<double>
     du_dt[f.b] += heat;
   }
   for (const Interface& f : interfaces_) {
-    const double heat = f.length_m * interface_flow(f.half_a, states_[f.a], f.half_b, states_[f.b],
-                                                    f.resistance_m2K_W)
-                                         .flux_W_m2;
-    du_dt[f.a] -= heat;
-    du_dt[f.b] += heat;
+    const double heat = f.length_m * flow(f).flux_W_m2;
+    du_dt[f.a.near] -= heat;
+    du_dt[f.b.near] += heat;
   }
-  for (const SurfaceFace& f : surface_) du_dt[f.cell] += f.length_m * flow(f, t_s).flux_W_m2;
+  for (const SurfaceFace& f : surface_) du_dt[f.in.near] += f.length_m * flow(f, t_s).flux_W_m2;
   for (std::size_t k = 0; k < u.size(); ++k) du_dt[k] *= weight_[k];
   if (!problem_.source_W_m3) return;
   for (std::size_t k = 0; k < u.size(); ++k) {
@@ -258,25 +285,40 @@ void HeatEquation::jacobian(double t_s, std::span<const double> u, std::span<dou
   update_states(u);
   update_outside(t_s);
   std::fill(values.begin(), values.end(), 0.0);
-  const auto add_pair = [&](const auto& f, double by_a, double by_b) {
+  for (const InnerFace& f : inner_) {
+    const double by_a = f.conductance * states_[f.a].potential_slope;
+    const double by_b = f.conductance * states_[f.b].potential_slope;
     values[f.entries[0]] -= by_a * weight_[f.a];
     values[f.entries[1]] += by_a * weight_[f.b];
-    values[f.entries[2]] -= by_b * weight_[f.a];
-    values[f.entries[3]] += by_b * weight_[f.b];
-  };
-  for (const InnerFace& f : inner_) {
-    add_pair(f, f.conductance * states_[f.a].potential_slope,
-             -f.conductance * states_[f.b].potential_slope);
+    values[f.entries[2]] += by_b * weight_[f.a];
+    values[f.entries[3]] -= by_b * weight_[f.b];
   }
+  add_interfaces(values);
+  add_surface(t_s, values);
+}
+
+void HeatEquation::add_interfaces(std::span<double> values) const {
   for (const Interface& f : interfaces_) {
-    const InterfaceFlow across =
-        interface_flow(f.half_a, states_[f.a], f.half_b, states_[f.b], f.resistance_m2K_W);
-    add_pair(f, f.length_m * across.slope_a * states_[f.a].potential_slope,
-             f.length_m * across.slope_b * states_[f.b].potential_slope);
+    const InterfaceFlow across = flow(f);
+    const double by_inner_a = f.length_m * across.inner_a_slope;
+    const double by_inner_b = f.length_m * across.inner_b_slope;
+    const std::array<double, 4> by_column{
+        by_inner_a * f.a.near_weight_1_m * states_[f.a.near].potential_slope,
+        by_inner_a * f.a.far_weight_1_m * states_[f.a.far].potential_slope,
+        by_inner_b * f.b.near_weight_1_m * states_[f.b.near].potential_slope,
+        by_inner_b * f.b.far_weight_1_m * states_[f.b.far].potential_slope};
+    for (std::size_t k = 0; k < by_column.size(); ++k) {
+      values[f.entries[2 * k]] -= by_column[k] * weight_[f.a.near];
+      values[f.entries[2 * k + 1]] += by_column[k] * weight_[f.b.near];
+    }
   }
+}
+
+void HeatEquation::add_surface(double t_s, std::span<double> values) const {
   for (const SurfaceFace& f : surface_) {
-    values[f.entry] += f.length_m * flow(f, t_s).potential_slope * states_[f.cell].potential_slope *
-                       weight_[f.cell];
+    const double by_inner = f.length_m * flow(f, t_s).inner_slope * weight_[f.in.near];
+    values[f.entries[0]] += by_inner * f.in.near_weight_1_m * states_[f.in.near].potential_slope;
+    values[f.entries[1]] += by_inner * f.in.far_weight_1_m * states_[f.in.far].potential_slope;
   }
 }
 
@@ -284,7 +326,8 @@ double HeatEquation::absorbed_W_m(double t_s, std::span<const double> u) {
   update_outside(t_s);
   double sum = 0;
   for (const SurfaceFace& f : surface_) {
-    states_[f.cell] = state(f.cell, u[f.cell], peaks_[f.cell]);
+    update_state(f.in.near, u[f.in.near]);
+    update_state(f.in.far, u[f.in.far]);
     sum += f.length_m * flow(f, t_s).flux_W_m2;
   }
   return sum;

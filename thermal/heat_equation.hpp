@@ -42,11 +42,15 @@ struct SparsePattern {
 
 /// The control-volume equations A_k du_k/dt = sum of the heat flows into cell k, u the volumetric
 /// enthalpy in kEnthalpyUnit_J_m3. Between cells of one material the flow is the difference of
-/// the conductivity integrals over the distance; across an interface the two half cells and the
-/// contact resistance act in series; the surface balances the half cell against the gas.
+/// the conductivity integrals over the distance. At an interface or the surface the temperatures
+/// of the faces follow from the balance of the flows, with the gradient in the material from a
+/// parabola through the face and the next two cells of the same material.
 class HeatEquation {
  public:
   explicit HeatEquation(HeatProblem problem);
+  // Its faces point at its curves.
+  HeatEquation(const HeatEquation&) = delete;
+  HeatEquation& operator=(const HeatEquation&) = delete;
 
   [[nodiscard]] const HeatProblem& problem() const { return problem_; }
   [[nodiscard]] const OrthogonalGrid& grid() const { return problem_.grid; }
@@ -74,6 +78,13 @@ class HeatEquation {
   }
   /// The neighbour of a cell, none at the end of the grid.
   [[nodiscard]] std::optional<CellIndex> neighbour(CellIndex at, Side side) const;
+  /// How the flow into a cell through one of its faces follows from the cells behind the face.
+  struct FaceStencil {
+    std::size_t near = 0, far = 0;  ///< far = near where only one cell can be used
+    FaceSide side;
+    double near_weight_1_m = 0, far_weight_1_m = 0;
+  };
+  [[nodiscard]] FaceStencil stencil(CellIndex at, Side side) const;
   /// Condition of a cell's face at the end of the grid; null where there is no flow.
   [[nodiscard]] const SurfaceCondition* condition(CellIndex at, Side side) const;
   /// Contact resistance between two neighbouring cells [m2K/W].
@@ -89,18 +100,16 @@ class HeatEquation {
     std::array<std::size_t, 4> entries;  // of (a,a), (b,a), (a,b), (b,b) in the Jacobian
   };
   struct Interface {
-    std::size_t a, b;
-    HalfCell half_a, half_b;
+    FaceStencil a, b;
     double length_m, resistance_m2K_W;
-    std::array<std::size_t, 4> entries;
+    std::array<std::size_t, 8> entries;  // rows a, b in columns a near, a far, b near, b far
   };
   struct SurfaceFace {
-    std::size_t cell;
-    HalfCell half;
+    FaceStencil in;
     double length_m;
     std::size_t condition;
     Point point;
-    std::size_t entry;
+    std::array<std::size_t, 2> entries;  // in columns near, far
   };
 
   void assign_curves();
@@ -109,11 +118,19 @@ class HeatEquation {
   void connect_surface(CellIndex at, Side side);
   void build_pattern();
   [[nodiscard]] std::size_t entry(std::size_t row, std::size_t column) const;
-  [[nodiscard]] std::array<std::size_t, 4> pair_entries(std::size_t a, std::size_t b) const;
 
+  void find_entries();
   void update_states(std::span<const double> u);
+  void update_state(std::size_t cell, double u);
   void update_outside(double t_s);
-  [[nodiscard]] FaceFlow flow(const SurfaceFace& face, double t_s) const;
+  [[nodiscard]] double inner_W_m2(const FaceStencil& face) const {
+    return face.near_weight_1_m * states_[face.near].potential_W_m +
+           face.far_weight_1_m * states_[face.far].potential_W_m;
+  }
+  [[nodiscard]] SurfaceFlow flow(const SurfaceFace& face, double t_s) const;
+  [[nodiscard]] InterfaceFlow flow(const Interface& face) const;
+  void add_interfaces(std::span<double> values) const;
+  void add_surface(double t_s, std::span<double> values) const;
 
   HeatProblem problem_;
   std::vector<EnthalpyCurve> curves_;
@@ -126,8 +143,7 @@ class HeatEquation {
   SparsePattern pattern_;
 
   std::vector<double> peaks_;
-  std::vector<double> dried_shift_;  // dried enthalpy at the peak minus the peak
-  std::vector<char> may_dry_;
+  std::vector<double> dried_shift_;  // dried enthalpy at the peak minus the peak; NaN: not known
   std::vector<EnthalpyCurve::State> states_;
   std::vector<double> outside_C_;  // by condition
 };

@@ -179,30 +179,38 @@ double angle_or_y(const OrthogonalGrid& grid, const Node& along_1, double along_
   return along_1.kind == Node::Kind::opposite ? opposite_angle(grid, along_2) : along_2;
 }
 
+InterfaceSide interface_side(const FieldView& field, const HeatEquation::FaceStencil& face) {
+  const EnthalpyCurve::State near = field.state(face.near);
+  const EnthalpyCurve::State far = field.state(face.far);
+  return {face.side,
+          face.near_weight_1_m * near.potential_W_m + face.far_weight_1_m * far.potential_W_m,
+          near.T_C};
+}
+
 }  // namespace
 
 double face_temperature_C(const FieldView& field, CellIndex at, Side side) {
   const HeatEquation& eq = *field.equation;
   const OrthogonalGrid& grid = eq.grid();
   const std::size_t cell = grid.index(at.i, at.j);
-  const EnthalpyCurve::State own = field.state(cell);
-  const HalfCell half{&eq.curve(cell), half_distance_m(grid, at, side)};
   if (const std::optional<CellIndex> next = eq.neighbour(at, side)) {
     const std::size_t other = grid.index(next->i, next->j);
-    const EnthalpyCurve::State beyond = field.state(other);
-    // Half a cell's extent is the same on both of its sides along an axis.
-    const HalfCell half_beyond{&eq.curve(other), half_distance_m(grid, *next, side)};
     if (same_material(eq, cell, other)) {
-      const double share = half.distance_m / (half.distance_m + half_beyond.distance_m);
-      return own.T_C + share * (beyond.T_C - own.T_C);
+      const double own_C = field.state(cell).T_C;
+      const double near = half_distance_m(grid, at, side);
+      const double share = near / (near + half_distance_m(grid, *next, side));
+      return own_C + share * (field.state(other).T_C - own_C);
     }
-    return interface_flow(half, own, half_beyond, beyond, eq.resistance_m2K_W(cell, other))
+    return interface_flow(interface_side(field, eq.stencil(at, side)),
+                          interface_side(field, eq.stencil(*next, opposite(side))),
+                          eq.resistance_m2K_W(cell, other))
         .face_a_C;
   }
+  const InterfaceSide in = interface_side(field, eq.stencil(at, side));
   const SurfaceCondition* seen = eq.condition(at, side);
-  if (seen == nullptr) return own.T_C;
+  if (seen == nullptr) return in.guess_C;
   const double outside = eq.outside_C(*seen, face_point(grid, at, side), field.t_s);
-  return surface_flow(half, own, *seen, outside).face_C;
+  return surface_flow(in.side, in.inner_W_m2, *seen, outside, in.guess_C).face_C;
 }
 
 double point_temperature_C(const FieldView& field, const GridPoint& at) {

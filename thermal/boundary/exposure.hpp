@@ -42,15 +42,15 @@ struct HeatedSurface {
 };
 
 struct Ambient {
-  double temperature_C = 20;       ///< also the initial temperature of the section
-  double convection_W_m2K = 9;     ///< radiation included
+  double temperature_C = 20;    ///< also the initial temperature of the section
+  double convection_W_m2K = 9;  ///< radiation included
 };
 
 /// The gas temperature against time: any function, with the times at which its slope jumps.
 struct GasTemperature {
   std::function<double(double t_s)> T_C;
-  std::vector<double> kinks_s;   ///< increasing
-  bool has_cooling = false;      ///< the gas cools within the followed time
+  std::vector<double> kinks_s;  ///< increasing
+  bool has_cooling = false;     ///< the gas cools within the followed time
 };
 
 /// Everything about the fire that the heat flow needs.

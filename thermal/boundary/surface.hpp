@@ -18,37 +18,49 @@ struct SurfaceCondition {
   std::function<double(double t_s, double x_m, double y_m)> T_C_at;
 };
 
-/// Heat flow through a face out of a half cell, with its derivative for the Newton iteration.
-struct FaceFlow {
-  double flux_W_m2 = 0;        ///< into the cell
-  double potential_slope = 0;  ///< d flux / d potential of the cell [1/m]
+/// The material side of a face: the heat flow from the face into the material is
+/// face_weight potential(T_face) - inner, where inner is a weighted sum of the potentials of the
+/// next one or two cells. With one cell at distance d both weights are 1/d; with two the gradient
+/// is that of the parabola through the face and both, which is a further order better.
+struct FaceSide {
+  const EnthalpyCurve* curve = nullptr;
+  double face_weight_1_m = 0;
+};
+
+/// Heat flow through a surface with its derivative for the Newton iteration.
+struct SurfaceFlow {
+  double flux_W_m2 = 0;    ///< into the material
+  double inner_slope = 0;  ///< d flux / d inner, negative
   double face_C = 0;
 };
 
-/// Half a cell between its middle and a face.
-struct HalfCell {
-  const EnthalpyCurve* curve = nullptr;
-  double distance_m = 0;
-};
-
-/// Balance of the face: (potential(face) - potential(cell)) / distance = flux from the gas,
+/// Balance of a surface: flow into the material = flux from the gas,
 /// alpha_c (T_g - T_f) + eps sigma ((T_g + 273.15)^4 - (T_f + 273.15)^4).
+/// @param inner_W_m2 see FaceSide
+/// @param guess_C start of the iteration, e.g. the temperature of the next cell
 /// @source en1991-1-2-2002 3.1
-[[nodiscard]] FaceFlow surface_flow(const HalfCell& half, const EnthalpyCurve::State& cell,
-                                    const SurfaceCondition& condition, double gas_C);
+[[nodiscard]] SurfaceFlow surface_flow(const FaceSide& side, double inner_W_m2,
+                                       const SurfaceCondition& condition, double gas_C,
+                                       double guess_C);
 
 /// The two faces of an interface, the flux across it and its derivatives.
 struct InterfaceFlow {
-  double flux_W_m2 = 0;  ///< from a to b
-  double slope_a = 0;    ///< d flux / d potential of a [1/m]
-  double slope_b = 0;    ///< d flux / d potential of b [1/m], negative
+  double flux_W_m2 = 0;      ///< from a to b
+  double inner_a_slope = 0;  ///< d flux / d inner of a
+  double inner_b_slope = 0;  ///< d flux / d inner of b, negative
   double face_a_C = 0;
   double face_b_C = 0;
 };
 
-/// Two half cells in series with a contact resistance [m2K/W] >= 0 between them.
-[[nodiscard]] InterfaceFlow interface_flow(const HalfCell& half_a, const EnthalpyCurve::State& a,
-                                           const HalfCell& half_b, const EnthalpyCurve::State& b,
+/// One side of an interface as interface_flow takes it.
+struct InterfaceSide {
+  FaceSide side;
+  double inner_W_m2 = 0;
+  double guess_C = 0;
+};
+
+/// The flow across an interface with a contact resistance [m2K/W] >= 0 between its faces.
+[[nodiscard]] InterfaceFlow interface_flow(const InterfaceSide& a, const InterfaceSide& b,
                                            double resistance_m2K_W);
 
 }  // namespace ringward::thermal

@@ -15,6 +15,19 @@ inline constexpr std::array<Side, 4> kSides{Side::low_1, Side::high_1, Side::low
   return side == Side::low_1 || side == Side::low_2;
 }
 
+[[nodiscard]] constexpr Side opposite(Side side) {
+  switch (side) {
+    case Side::low_1:
+      return Side::high_1;
+    case Side::high_1:
+      return Side::low_1;
+    case Side::low_2:
+      return Side::high_2;
+    default:
+      return Side::low_2;
+  }
+}
+
 /// Column and row of a cell.
 struct CellIndex {
   std::size_t i = 0;

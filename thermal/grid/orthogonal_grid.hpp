@@ -14,7 +14,7 @@ enum class Symmetry { none, half, quarter, axisymmetric };
 
 /// One cell of the solved part of the section.
 struct Cell {
-  double x_m = 0;     ///< centroid (axisymmetric: the mean radius, with y = 0)
+  double x_m = 0;  ///< centroid; axisymmetric: the ring's mean radius by area, with y = 0
   double y_m = 0;
   double area_m2 = 0;  ///< axisymmetric: the whole ring
   Layer layer = Layer::core;

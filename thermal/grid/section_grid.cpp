@@ -13,9 +13,9 @@ namespace ringward::thermal {
 namespace {
 
 // Sizes of the standard grid. Found by comparing with converged solutions of round and square
-// tubed columns: they leave about 1 K.
-constexpr SizeLaw kCoreSize{.first_m = 2.0e-3, .growth = 0.10, .largest_m = 16e-3};
-constexpr double kTubeSize_m = 4e-3;
+// tubed columns: they leave about 0.5 K.
+constexpr SizeLaw kCoreSize{.first_m = 2.5e-3, .growth = 0.10, .largest_m = 8e-3};
+constexpr double kTubeSize_m = 3e-3;
 constexpr double kUnheatedFactor = 2.0;
 constexpr int kLeastTubeCells = 2;
 constexpr double kProtectionCells = 6.0;

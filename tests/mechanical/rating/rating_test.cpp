@@ -1,0 +1,175 @@
+#include <catch2/catch.hpp>
+
+#include "mechanical/rating/rating.hpp"
+#include "tests/support/columns.hpp"
+#include "thermal/base/units.hpp"
+
+using namespace ringward;
+using namespace ringward::mechanical;
+using thermal::Accuracy;
+
+namespace {
+
+double minutes(const std::optional<double>& fire_resistance_s) {
+  return units::min_from_s(fire_resistance_s.value());
+}
+
+bool has_notice(const Rating& rating, const std::string& code) {
+  for (const Notice& notice : rating.notices) {
+    if (notice.code == code) return true;
+  }
+  return false;
+}
+
+/// As the section of the snap-through example: so short that only the section matters.
+Column stub(double load_N) {
+  Column column = testing::round_column({});
+  column.confinement = ConfinementModel::contact;
+  column.member = {.length_m = 0.4, .buckling_length_m = 0.4, .imperfection_m = 1e-5};
+  column.load.axial_N = load_N;
+  return column;
+}
+
+}  // namespace
+
+TEST_CASE("a tubed column under 4500 kN falls at its first peak and is not saved by the second") {
+  // Independent rough calculation (derived, no publication): 400 x 5, C40: first peak 4443 kN at
+  // 20 min and 4677 kN at 10 min, second peak 4849 kN at 0.9 % strain; lost at 17 to 18 min.
+  const Rating rating = rate(stub(4.5e6), testing::standard_fire(60), Accuracy::standard);
+  CHECK(minutes(rating.chosen.fire_resistance_s) > 17.0);
+  CHECK(minutes(rating.chosen.fire_resistance_s) < 18.0);
+  CHECK(rating.chosen.reserve_N > 4.8e6);
+  CHECK(has_notice(rating, "reserve-at-larger-strain"));
+}
+
+TEST_CASE("the history ends at the fall, where capacity meets the load") {
+  const Rating rating = rate(stub(4.2e6), testing::standard_fire(90), Accuracy::standard);
+  const HistoryRow& last = rating.chosen.history.back();
+  CHECK(last.time_s == rating.chosen.fire_resistance_s.value());
+  // 0.005 min before the crossing, at a slope of about 20 kN/min: 0.1 kN, less than 1e-4.
+  CHECK(last.capacity_N == Approx(4.2e6).epsilon(1e-4));
+  CHECK(last.capacity_N >= 4.2e6 * (1.0 - 1e-8));
+  double before_s = -1.0;
+  for (const HistoryRow& row : rating.chosen.history) {
+    CHECK(row.time_s > before_s);
+    CHECK(row.capacity_N >= row.demand_N * (1.0 - 1e-8));
+    before_s = row.time_s;
+  }
+}
+
+TEST_CASE("more confinement never shortens the life of a stocky column") {
+  for (const double load_N : {3.0e6, 4.2e6, 5.0e6}) {
+    const Rating rating = rate(stub(load_N), testing::standard_fire(120), Accuracy::standard);
+    const auto or_end = [](const std::optional<double>& s) { return s.value_or(7200.0); };
+    CAPTURE(load_N);
+    // Equal within the resolution of the search where the tube has no grip.
+    CHECK(or_end(rating.bounds.none_s) <= or_end(rating.bounds.contact_s) + 0.6);
+    CHECK(or_end(rating.bounds.contact_s) <= or_end(rating.bounds.yield_s) + 0.6);
+  }
+}
+
+TEST_CASE("under all-round heating without confinement the capacity never rises") {
+  Column column = testing::round_column({.bars = 8});
+  column.load.axial_N = 1.2e6;
+  const Rating rating = rate(column, testing::standard_fire(240), Accuracy::standard);
+  for (std::size_t k = 1; k < rating.chosen.history.size(); ++k) {
+    // The project asks for 0.1 % of the cold value: what thermal self-stress may do.
+    CHECK(rating.chosen.history[k].capacity_N <=
+          rating.chosen.history[k - 1].capacity_N + 1e-3 * rating.chosen.cold_capacity_N);
+  }
+}
+
+TEST_CASE("a load above the cold capacity is a resistance of zero, with its notice") {
+  const Rating rating = rate(stub(9e6), testing::standard_fire(30), Accuracy::coarse);
+  CHECK(rating.chosen.fire_resistance_s.value() == 0.0);
+  CHECK(has_notice(rating, "load-above-cold-resistance"));
+  CHECK(rating.chosen.history.size() == 1);
+}
+
+TEST_CASE("a lightly loaded column survives the followed fire") {
+  const Rating rating = rate(stub(3e5), testing::standard_fire(60), Accuracy::coarse);
+  CHECK_FALSE(rating.chosen.fire_resistance_s.has_value());
+  CHECK(rating.chosen.history.back().time_s == 3600.0);
+}
+
+TEST_CASE("end gaps of 10 mm close early and take the confinement with them") {
+  // Independent rough calculation (derived, no publication): a bare 3.5 m tube closes 10 mm gaps at
+  // about 11 min; the load's own shortening brings it forward.
+  Column column = testing::round_column({.end_gap_m = 0.010});
+  column.confinement = ConfinementModel::contact;
+  column.load.axial_N = 1.5e6;
+  const Rating rating = rate(column, testing::standard_fire(60), Accuracy::standard);
+  double closed_min = -1.0;
+  for (const TubeEvent& event : rating.chosen.events) {
+    if (event.kind == TubeEventKind::end_gap_closed) closed_min = units::min_from_s(event.time_s);
+  }
+  CHECK(closed_min > 8.0);
+  CHECK(closed_min < 12.0);
+  CHECK(has_notice(rating, "end-gap-closed"));
+}
+
+TEST_CASE("the closing of the end gap ends a column that lives on its confinement") {
+  Column column = stub(6.0e6);
+  column.section.tube->end_gap_m = 0.002;
+  const Rating closing = rate(column, testing::standard_fire(30), Accuracy::standard);
+  column.section.tube->end_gap_m = 0.1;
+  const Rating open = rate(column, testing::standard_fire(30), Accuracy::standard);
+  CHECK(minutes(closing.chosen.fire_resistance_s) < minutes(open.chosen.fire_resistance_s) - 1.0);
+  CHECK(closing.chosen.criterion == "loss of confinement when the end gap closes");
+}
+
+TEST_CASE("a column heated on one side is rated the same from whichever side") {
+  const auto rated = [](thermal::Face heated) {
+    thermal::FireExposure fire = testing::standard_fire(180);
+    fire.exposed.faces.fill(thermal::FaceCondition::ambient);
+    fire.exposed.faces[static_cast<std::size_t>(heated)] = thermal::FaceCondition::heated;
+    return rate(testing::square_concrete_column(0.25), fire, Accuracy::coarse);
+  };
+  const Rating left = rated(thermal::Face::left);
+  const Rating top = rated(thermal::Face::top);
+  REQUIRE(left.chosen.fire_resistance_s.has_value());
+  // The same problem turned by a right angle: different cell numbering, so solver tolerance.
+  CHECK(minutes(left.chosen.fire_resistance_s) ==
+        Approx(minutes(top.chosen.fire_resistance_s)).margin(0.02));
+}
+
+TEST_CASE("an eccentricity and its mirror image give the same resistance") {
+  const auto rated = [](double e_x_m, double e_y_m) {
+    Column column = testing::square_concrete_column(0.3);
+    column.load.eccentricity_x_m = e_x_m;
+    column.load.eccentricity_y_m = e_y_m;
+    return minutes(rate(column, testing::standard_fire(120), Accuracy::coarse)
+                       .chosen.fire_resistance_s);
+  };
+  const double along_x = rated(0.03, 0.0);
+  // Symmetric section: only the resolution of the search (0.005 min) and rounding differ.
+  CHECK(rated(-0.03, 0.0) == Approx(along_x).margin(0.02));
+  CHECK(rated(0.0, 0.03) == Approx(along_x).margin(0.02));
+  const double oblique = rated(0.02, 0.02);
+  CHECK(rated(-0.02, 0.02) == Approx(oblique).margin(0.02));
+}
+
+TEST_CASE("a longer column, a larger load and a larger eccentricity never last longer") {
+  const auto rated = [](double length_m, double load_N, double e_m) {
+    Column column = testing::square_concrete_column(0.3);
+    column.member = {length_m, length_m, length_m / 400.0};
+    column.load.axial_N = load_N;
+    column.load.eccentricity_x_m = e_m;
+    return units::min_from_s(rate(column, testing::standard_fire(240), Accuracy::coarse)
+                                 .chosen.fire_resistance_s.value_or(1e9));
+  };
+  const double base = rated(3.0, 8e5, 0.0);
+  CHECK(rated(4.0, 8e5, 0.0) < base);
+  CHECK(rated(3.0, 1e6, 0.0) < base);
+  CHECK(rated(3.0, 8e5, 0.03) < base);
+}
+
+TEST_CASE("the stated uncertainty covers the distance to a finer solution") {
+  for (const double load_N : {3.0e6, 3.6e6}) {
+    const Rating standard = rate(stub(load_N), testing::standard_fire(120), Accuracy::standard);
+    const Rating fine = rate(stub(load_N), testing::standard_fire(120), Accuracy::fine);
+    const double error_s = std::abs(*standard.chosen.fire_resistance_s - *fine.chosen.fire_resistance_s);
+    CAPTURE(load_N, error_s, standard.uncertainty_s);
+    CHECK(error_s <= standard.uncertainty_s);
+  }
+}

@@ -3,6 +3,7 @@
 #include <functional>
 #include <nlohmann/json.hpp>
 
+#include "cli/input/text_wrap.hpp"
 #include "cli/output/cautions.hpp"
 #include "cli/output/csv.hpp"
 #include "cli/output/json_number.hpp"
@@ -67,7 +68,8 @@ std::string state_table(const CapacityReport& report) {
 
 std::string legend() {
   const auto entry = [](const std::string& name, const std::string& meaning) {
-    return "  " + name + std::string(10 - name.size(), ' ') + wrapped(meaning, 12) + "\n";
+    return "  " + name + std::string(10 - name.size(), ' ') +
+           wrapped(meaning, 12, std::string(12, ' ')) + "\n";
   };
   return entry("plastic", "sum of area times hot strength, core unconfined") +
          entry("section", "largest axial force of the section at zero curvature") +

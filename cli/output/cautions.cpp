@@ -1,49 +1,31 @@
 #include "cli/output/cautions.hpp"
 
 #include <algorithm>
-#include <sstream>
+#include <string>
+
+#include "cli/input/text_wrap.hpp"
 
 namespace ringward::cli {
 namespace {
 
-constexpr std::size_t kLineWidth = 96;
 constexpr std::size_t kBulletIndent = 4;
 constexpr std::size_t kNoticeIndent = 11;
 
 bool same(const Notice& a, const Notice& b) { return a.code == b.code && a.text == b.text; }
 
 std::string bullet(const std::string& sentence) {
-  return "  - " + wrapped(sentence, kBulletIndent) + "\n";
+  return "  - " + wrapped(sentence, kBulletIndent, std::string(kBulletIndent, ' ')) + "\n";
 }
 
 std::string notice_line(const Notice& notice, const Style& style) {
   const bool is_caution = notice.severity == Severity::caution;
   const std::string label = is_caution ? style.caution("CAUTION") + "  " : "note     ";
   const std::string source = notice.source.empty() ? "" : " [" + notice.source + "]";
-  return "  " + label + wrapped(notice.text + source, kNoticeIndent) + "\n";
+  return "  " + label +
+         wrapped(notice.text + source, kNoticeIndent, std::string(kNoticeIndent, ' ')) + "\n";
 }
 
 }  // namespace
-
-std::string wrapped(const std::string& text, std::size_t indent) {
-  std::istringstream words(text);
-  std::string result;
-  std::string word;
-  std::size_t column = indent;
-  while (words >> word) {
-    const bool first = result.empty();
-    if (!first && column + 1 + word.size() > kLineWidth) {
-      result.append("\n").append(indent, ' ');
-      column = indent;
-    } else if (!first) {
-      result.append(" ");
-      ++column;
-    }
-    result.append(word);
-    column += word.size();
-  }
-  return result;
-}
 
 Notices ordered_notices(const Notices& notices) {
   Notices ordered;

@@ -19,8 +19,4 @@ enum class CautionForm { full, brief };
 /// `notices` in the order they are shown: cautions first, repeated ones once.
 [[nodiscard]] Notices ordered_notices(const Notices& notices);
 
-/// Breaks `text` at spaces into lines of at most 96 columns; lines after the first start with
-/// `indent` spaces, and the first is taken to begin there already.
-[[nodiscard]] std::string wrapped(const std::string& text, std::size_t indent);
-
 }  // namespace ringward::cli

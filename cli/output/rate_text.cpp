@@ -2,6 +2,7 @@
 
 #include <cmath>
 
+#include "cli/input/text_wrap.hpp"
 #include "cli/output/cautions.hpp"
 #include "cli/output/history_columns.hpp"
 #include "cli/output/numbers.hpp"
@@ -27,7 +28,8 @@ bool has_confining_tube(const RateReport& report) {
 }
 
 std::string line(const std::string& label, const std::string& value) {
-  return fmt::format("  {:<{}}", label, kLabelWidth - 2) + wrapped(value, kLabelWidth) + "\n";
+  return fmt::format("  {:<{}}", label, kLabelWidth - 2) +
+         wrapped(value, kLabelWidth, std::string(kLabelWidth, ' ')) + "\n";
 }
 
 // To one decimal, on the safe side of the exact value.

@@ -52,7 +52,7 @@ void set_up_child(const ProcessSetup& setup) {
 
 ProcessResult run_command(const std::vector<std::string>& command, const ProcessSetup& setup) {
   const TemporaryFolder streams;
-  write_file(streams / "in", setup.stdin_text);
+  write_content(streams / "in", setup.stdin_text);
   const std::string out = setup.stdout_device.empty() ? streams / "out" : setup.stdout_device;
   const pid_t child = fork();
   if (child == 0) {
@@ -69,8 +69,8 @@ ProcessResult run_command(const std::vector<std::string>& command, const Process
   }
   ProcessResult result;
   result.exit_code = exit_code_of(child);
-  if (setup.stdout_device.empty()) result.out = read_file(streams / "out");
-  result.err = read_file(streams / "err");
+  if (setup.stdout_device.empty()) result.out = file_content(streams / "out");
+  result.err = file_content(streams / "err");
   return result;
 }
 
@@ -107,7 +107,7 @@ ProcessResult run_with_broken_pipe(const std::vector<std::string>& arguments) {
   close(ends[1]);
   ProcessResult result;
   result.exit_code = exit_code_of(child);
-  result.err = read_file(streams / "err");
+  result.err = file_content(streams / "err");
   return result;
 }
 
@@ -154,7 +154,7 @@ std::vector<std::string> TemporaryFolder::names() const {
   return names;
 }
 
-std::string read_file(const std::string& path) {
+std::string file_content(const std::string& path) {
   std::ifstream file(path, std::ios::binary);
   if (!file) throw std::runtime_error("cannot read " + path);
   std::ostringstream text;
@@ -162,7 +162,7 @@ std::string read_file(const std::string& path) {
   return text.str();
 }
 
-void write_file(const std::string& path, const std::string& text) {
+void write_content(const std::string& path, const std::string& text) {
   std::ofstream file(path, std::ios::binary);
   file << text;
   if (!file) throw std::runtime_error("cannot write " + path);

@@ -57,7 +57,7 @@ class TemporaryFolder {
   std::filesystem::path path_;
 };
 
-[[nodiscard]] std::string read_file(const std::string& path);
-void write_file(const std::string& path, const std::string& text);
+[[nodiscard]] std::string file_content(const std::string& path);
+void write_content(const std::string& path, const std::string& text);
 
 }  // namespace ringward::testing

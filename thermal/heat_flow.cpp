@@ -29,7 +29,20 @@ int condition_index(FaceCondition seen) {
   return seen == FaceCondition::heated ? kHeated : kAmbient;
 }
 
-HeatProblem problem_of(const Section& section, const FireExposure& fire, SectionGrid built) {
+/// The steps are chosen for the heat balance (below 1e-4); for 0.1 K four times these would do.
+TimeTolerance tolerance_of(const Resolution& resolution) {
+  const double named = resolution.accuracy == Accuracy::coarse     ? 2.0
+                       : resolution.accuracy == Accuracy::standard ? 1.0
+                                                                   : 0.4;
+  const double factor = named * resolution.scale;
+  return {.relative = 5e-6 * factor, .absolute = 0.01 * factor, .highest_order = 5};
+}
+
+}  // namespace
+
+HeatProblem heat_problem_of(const Section& section, const FireExposure& fire,
+                            const Resolution& resolution) {
+  SectionGrid built = grid_of_section(section, fire.exposed, resolution);
   HeatProblem problem;
   for (std::size_t side = 0; side < built.sides.size(); ++side) {
     for (FaceCondition seen : built.sides[side]) {
@@ -50,25 +63,13 @@ HeatProblem problem_of(const Section& section, const FireExposure& fire, Section
   return problem;
 }
 
-/// The steps are chosen for the heat balance (below 1e-4); for 0.1 K four times these would do.
-TimeTolerance tolerance_of(const Resolution& resolution) {
-  const double named = resolution.accuracy == Accuracy::coarse     ? 2.0
-                       : resolution.accuracy == Accuracy::standard ? 1.0
-                                                                   : 0.4;
-  const double factor = named * resolution.scale;
-  return {.relative = 5e-6 * factor, .absolute = 0.01 * factor, .highest_order = 5};
-}
-
-}  // namespace
-
 TemperatureHistory solve_heat_flow(const Section& section, const FireExposure& fire,
                                    const Resolution& resolution) {
   HeatRun run;
   run.end_s = fire.duration_s;
   run.tolerance = tolerance_of(resolution);
   run.gas = fire.gas;
-  return solve_heat_problem(
-      problem_of(section, fire, grid_of_section(section, fire.exposed, resolution)), run);
+  return solve_heat_problem(heat_problem_of(section, fire, resolution), run);
 }
 
 }  // namespace ringward::thermal

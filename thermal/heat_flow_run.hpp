@@ -24,6 +24,10 @@ struct HeatRun {
 /// 0.1 min apart at first, growing to 1 min from half an hour on.
 [[nodiscard]] std::vector<double> usual_kept_times(double end_s);
 
+/// The problem of a section in a fire, on the grid that suits it.
+[[nodiscard]] HeatProblem heat_problem_of(const Section& section, const FireExposure& fire,
+                                          const Resolution& resolution);
+
 /// Solves any heat problem; solve_heat_flow poses a section in fire as one.
 /// @throws Error(bad_input) when end_s is not above zero
 /// @throws Error(solver_breakdown) with the time and the place when the integrator gives up

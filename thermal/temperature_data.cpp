@@ -5,6 +5,7 @@
 #include <limits>
 
 #include "thermal/field_at_time.hpp"
+#include "thermal/law_range.hpp"
 
 namespace ringward::thermal {
 namespace {
@@ -158,6 +159,7 @@ void TemperatureHistory::Data::finish() {
   tube_strips = StripFinder(equation->grid()).strips();
   core_faces = faces_of_core(*equation);
   core_corners = corners_of_core(equation->grid(), core_faces);
+  notices = law_range_notices(*equation);
   if (tube_strips.empty()) return;
   std::vector<double> cells_C(equation->size());
   for (double t_s : times_s) {

@@ -38,7 +38,7 @@ struct TemperatureHistory::Data {
   std::vector<CoreFace> core_faces;
   std::vector<GridPoint> core_corners;
 
-  /// Prepares strips, faces and the tube's history once all fields are in.
+  /// Prepares strips, faces, the tube's history and the notices once all fields are in.
   void finish();
 };
 

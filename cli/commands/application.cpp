@@ -38,12 +38,6 @@ std::string chosen_command(const CLI::App& root) {
   return chosen.empty() ? "" : chosen.front()->get_name();
 }
 
-// The application whose --help was asked for.
-const CLI::App& helped(const CLI::App& root) {
-  const std::vector<CLI::App*> chosen = root.get_subcommands();
-  return chosen.empty() ? root : *chosen.front();
-}
-
 ExitCode run_chosen(const std::vector<Command>& commands) {
   for (const Command& command : commands) {
     if (command.app->parsed()) return command.run();
@@ -61,7 +55,7 @@ ExitCode parse_and_run(CLI::App& root, int argc, char** argv) {
   try {
     root.parse(argc, argv);
   } catch (const CLI::CallForHelp&) {
-    write_stdout(helped(root).help());
+    write_stdout(root.help());
     return ExitCode::ok;
   } catch (const CLI::CallForVersion&) {
     write_stdout("ringward " RINGWARD_VERSION "\n");

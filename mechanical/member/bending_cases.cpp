@@ -12,6 +12,9 @@ namespace {
 constexpr double kLeastImperfection = 1e-5;  // of the buckling length
 constexpr double kSymmetryTolerance = 1e-5;  // of the sum of absolute contributions
 
+// Cold thermal strains are rounding noise: differences count against this strain.
+constexpr double kStrainScale = 1e-3;
+
 /// Sums of area x hot property x u^m v^n over the fibres at a few times: equal sums mean sections
 /// that bend alike, vanishing odd sums mean symmetry.
 class SectionMoments {
@@ -29,12 +32,14 @@ class SectionMoments {
     for (const HotMaterials& hot : times_) {
       result.push_back(
           sum(layout_.concrete, m, n, [&](std::size_t s) { return hot.concrete[s].f_c_Pa; }));
-      result.push_back(sum(layout_.concrete, m, n,
-                           [&](std::size_t s) { return hot.concrete[s].thermal_strain; }));
+      result.push_back(sum(layout_.concrete, m, n, [&](std::size_t s) {
+        return kStrainScale + hot.concrete[s].thermal_strain;
+      }));
       result.push_back(
           sum(layout_.steel, m, n, [&](std::size_t s) { return hot.steel[s].f_y_Pa; }));
-      result.push_back(
-          sum(layout_.steel, m, n, [&](std::size_t s) { return hot.steel[s].thermal_strain; }));
+      result.push_back(sum(layout_.steel, m, n, [&](std::size_t s) {
+        return kStrainScale + hot.steel[s].thermal_strain;
+      }));
     }
     return result;
   }

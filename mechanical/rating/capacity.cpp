@@ -1,5 +1,6 @@
 #include <algorithm>
 #include <array>
+#include <limits>
 
 #include "mechanical/rating/single_rating.hpp"
 #include "thermal/base/error.hpp"
@@ -39,32 +40,34 @@ double largest_value(Function f, double from, double to, int count) {
   return std::max(best, f(0.5 * (low + high)));
 }
 
-/// Follows one case under a load from the cold state to `t_s`. None when it does not stand there.
-std::optional<StandingColumn> stand_at(const StandingCase& fixed, MaterialsInTime& in_time,
-                                       double t_s) {
-  CaseHistory history;
-  std::optional<StandingColumn> last = follow_to(fixed, in_time, t_s, history);
-  if (history.fall_s) return std::nullopt;
-  return last;
-}
-
 struct MemberState {
   double capacity_N = 0;
   double reserve_N = 0;
   double pressure_Pa = 0;
 };
 
-MemberState member_state(StandingCase fixed, MaterialsInTime& in_time, double t_s) {
+MemberState state_of(const StandingColumn& standing) {
+  const PathPoint limit = standing.limit();
+  const double capacity_N = standing.force_N(limit);
+  return {capacity_N, std::max(capacity_N, standing.reserve_N()), limit.pressure_Pa};
+}
+
+/// The states of one case at all times. From its fall on, the same column under a lighter load is
+/// followed in its place; one that cannot even carry that has no capacity left.
+std::vector<MemberState> member_states(StandingCase fixed, MaterialsInTime& in_time,
+                                       const std::vector<double>& times_s) {
   const double load_N = fixed.load_N;
+  std::vector<MemberState> states;
   for (const double share : kLighterLoads) {
     fixed.load_N = share * load_N;
-    const std::optional<StandingColumn> standing = stand_at(fixed, in_time, t_s);
-    if (!standing) continue;
-    const PathPoint limit = standing->limit();
-    const double capacity_N = standing->force_N(limit);
-    return {capacity_N, std::max(capacity_N, standing->reserve_N()), limit.pressure_Pa};
+    const std::vector<double> left(times_s.begin() + static_cast<std::ptrdiff_t>(states.size()),
+                                   times_s.end());
+    if (left.empty()) break;
+    follow_through(fixed, in_time, left,
+                   [&](const StandingColumn& standing) { states.push_back(state_of(standing)); });
   }
-  return {};
+  states.resize(times_s.size());
+  return states;
 }
 
 double section_N(const Column& column, const SectionMaterials& materials, const HotMaterials& hot) {
@@ -82,6 +85,14 @@ double plastic_N(const Column& column, const SectionMaterials& materials, const 
   return HotSection(layout, hot, TubeGrip{}, materials.cold_concrete_Pa()).plastic_N();
 }
 
+void take(CapacityState& state, const MemberState& member) {
+  state.capacity_N = member.capacity_N;
+  state.reserve_N = member.reserve_N;
+  state.lateral_pressure_Pa = member.pressure_Pa;
+  state.utilisation = member.capacity_N > 0.0 ? state.demand_N / member.capacity_N
+                                              : std::numeric_limits<double>::infinity();
+}
+
 }  // namespace
 
 std::vector<CapacityState> capacities(const Column& column,
@@ -93,24 +104,20 @@ std::vector<CapacityState> capacities(const Column& column,
   std::vector<CapacityState> states;
   for (const double t_s : times_s) {
     const HotMaterials& hot = *in_time.at(t_s);
-    CapacityState state{.time_s = t_s,
-                        .plastic_N = plastic_N(column, materials, hot),
-                        .section_N = section_N(column, materials, hot),
-                        .demand_N = column.load.axial_N};
-    bool first = true;
-    for (const BendingCase& bending : setup.cases) {
-      const StandingCase fixed{column,  materials,          setup.shape,
-                               bending, column.confinement, column.load.axial_N};
-      const MemberState member = member_state(fixed, in_time, t_s);
-      if (first || member.capacity_N < state.capacity_N) {
-        state.capacity_N = member.capacity_N;
-        state.reserve_N = member.reserve_N;
-        state.lateral_pressure_Pa = member.pressure_Pa;
-      }
-      first = false;
+    states.push_back({.time_s = t_s,
+                      .plastic_N = plastic_N(column, materials, hot),
+                      .section_N = section_N(column, materials, hot),
+                      .demand_N = column.load.axial_N});
+  }
+  bool first = true;
+  for (const BendingCase& bending : setup.cases) {
+    const StandingCase fixed{column,  materials,          setup.shape,
+                             bending, column.confinement, column.load.axial_N};
+    const std::vector<MemberState> members = member_states(fixed, in_time, times_s);
+    for (std::size_t k = 0; k < states.size(); ++k) {
+      if (first || members[k].capacity_N < states[k].capacity_N) take(states[k], members[k]);
     }
-    state.utilisation = state.demand_N / state.capacity_N;
-    states.push_back(state);
+    first = false;
   }
   return states;
 }

@@ -29,15 +29,18 @@ class CaseFollower {
     return std::move(history_);
   }
 
-  std::optional<StandingColumn> run_to(double t_s, CaseHistory& history) {
+  void run_through(const std::vector<double>& times_s,
+                   const std::function<void(const StandingColumn&)>& show) {
     sampling_ = false;
-    bool stands = load();
-    for (const double to_s : search_times(in_time_.materials().history())) {
-      if (stands) stands = go_to(std::min(to_s, t_s));
+    if (!load()) return;
+    const std::vector<double> search_s = search_times(in_time_.materials().history());
+    for (const double t_s : times_s) {
+      for (const double to_s : search_s) {
+        if (to_s > standing_.time_s() && to_s < t_s && !go_to(to_s)) return;
+      }
+      if (!go_to(t_s)) return;
+      show(standing_);
     }
-    history = std::move(history_);
-    if (!stands) return std::nullopt;
-    return standing_;
   }
 
  private:
@@ -216,9 +219,10 @@ CaseHistory follow_case(const StandingCase& fixed, MaterialsInTime& in_time,
   return CaseFollower(fixed, in_time).run(sample_s, until_s);
 }
 
-std::optional<StandingColumn> follow_to(const StandingCase& fixed, MaterialsInTime& in_time,
-                                        double t_s, CaseHistory& history) {
-  return CaseFollower(fixed, in_time).run_to(t_s, history);
+void follow_through(const StandingCase& fixed, MaterialsInTime& in_time,
+                    const std::vector<double>& times_s,
+                    const std::function<void(const StandingColumn&)>& show) {
+  CaseFollower(fixed, in_time).run_through(times_s, show);
 }
 
 }  // namespace ringward::mechanical

@@ -15,6 +15,7 @@ constexpr const char* kCommonPractice = "common practice, no source";
 /// Above this share of the cold strength, losing the confinement is news.
 constexpr double kHighConfinementRatio = 1.3;
 constexpr double kReserveWorthNaming = 1.01;
+constexpr double kOneSecond = 1.0;
 
 class NoticeWriter {
  public:
@@ -107,6 +108,16 @@ void yield_model(NoticeWriter& write, const Column& column) {
                 "and ignores the closing of the end gaps: it is an upper bound, not a rating.");
 }
 
+void unordered_bounds(NoticeWriter& write, const Rating& rating) {
+  const auto or_end = [&](const std::optional<double>& s) { return s.value_or(rating.followed_s); };
+  if (or_end(rating.bounds.yield_s) >= or_end(rating.bounds.none_s) - kOneSecond) return;
+  write.note("confinement-softens",
+             "With full tube pressure this column falls sooner than without: the law for confined "
+             "concrete moves its peak to a larger strain and so lowers its stiffness, which a "
+             "slender column misses more than it gains from the strength.",
+             "richart1928");
+}
+
 void reserve(NoticeWriter& write, const SingleRating& chosen) {
   if (!chosen.fire_resistance_s || chosen.history.empty()) return;
   const double capacity_N = chosen.history.back().capacity_N;
@@ -169,6 +180,7 @@ Notices rating_notices(const Column& column, const thermal::FireExposure& fire,
   confinement_worth(write, column, rating);
   uniform_pressure(write, column, fire);
   yield_model(write, column);
+  unordered_bounds(write, rating);
   reserve(write, rating.chosen);
   cooling(write, column, fire);
   composite_tube(write, column);

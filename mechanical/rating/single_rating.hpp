@@ -1,5 +1,7 @@
 #pragma once
 
+#include <functional>
+#include <memory>
 #include <optional>
 #include <vector>
 
@@ -50,11 +52,12 @@ class MaterialsInTime {
 [[nodiscard]] CaseHistory follow_case(const StandingCase& fixed, MaterialsInTime& in_time,
                                       const std::vector<double>& sample_s, double until_s);
 
-/// Follows one case to `t_s` without sampling its capacity. None when it falls before (its time is
-/// then in `history`).
-[[nodiscard]] std::optional<StandingColumn> follow_to(const StandingCase& fixed,
-                                                      MaterialsInTime& in_time, double t_s,
-                                                      CaseHistory& history);
+/// Follows one case without sampling its capacity, and shows the standing column at each of the
+/// times that it reaches.
+/// @param times_s increasing
+void follow_through(const StandingCase& fixed, MaterialsInTime& in_time,
+                    const std::vector<double>& times_s,
+                    const std::function<void(const StandingColumn&)>& show);
 
 /// Rates one column with one model: the earliest fall of all cases.
 [[nodiscard]] SingleRating rate_single(const Column& column, ConfinementModel model,

@@ -20,6 +20,8 @@ namespace ringward::thermal {
 namespace {
 
 constexpr long kMostFailedSteps = 40;
+// Without a bound, steps would shrink for ever in front of a time at which no rate exists.
+constexpr double kShortestStep_s = 1e-8;
 constexpr int kOrderByMinimumDegree = 0;  // KLU's AMD: the pattern is symmetric
 
 struct VectorDeleter {
@@ -179,6 +181,7 @@ CvodeIntegrator::CvodeIntegrator(OdeSystem& system, const std::vector<double>& s
   require(CVodeSetUserData(cvode, &m), "the user data");
   require(CVodeSStolerances(cvode, tolerance.relative, tolerance.absolute), "the tolerance");
   require(CVodeSetMaxOrd(cvode, tolerance.highest_order), "the highest order");
+  require(CVodeSetMinStep(cvode, kShortestStep_s), "the shortest step");
   require(CVodeSetMaxErrTestFails(cvode, kMostFailedSteps), "the limit of failed steps");
   m.create_matrix();
   require(CVodeSetLinearSolver(cvode, m.solver.get(), m.matrix.get()), "the linear solver");

@@ -2,7 +2,6 @@
 
 #include <cstdlib>
 #include <fstream>
-#include <sstream>
 #include <stdexcept>
 #include <string>
 #include <vector>
@@ -50,11 +49,19 @@ class PublishedTable {
   }
 
  private:
+  /// Fields between commas; a comma inside double quotes belongs to its field.
   [[nodiscard]] static std::vector<std::string> split(const std::string& line) {
-    std::vector<std::string> fields;
-    std::istringstream in(line);
-    for (std::string field; std::getline(in, field, ',');) fields.push_back(field);
-    if (line.back() == ',') fields.emplace_back();
+    std::vector<std::string> fields(1);
+    bool quoted = false;
+    for (const char c : line) {
+      if (c == '"') {
+        quoted = !quoted;
+      } else if (c == ',' && !quoted) {
+        fields.emplace_back();
+      } else {
+        fields.back() += c;
+      }
+    }
     return fields;
   }
 

@@ -14,7 +14,13 @@ namespace {
 
 // Sizes of the standard grid. Found by comparing with converged solutions of round and square
 // tubed columns: they leave about 0.5 K.
-constexpr SizeLaw kCoreSize{.first_m = 2.5e-3, .growth = 0.10, .largest_m = 8e-3};
+constexpr double kFirstSize_m = 2.5e-3;
+constexpr double kGrowth = 0.10;
+// Late in a fire the temperature varies over the half width of the core, so that the largest
+// cells follow it.
+constexpr double kCellsToCentre = 18.0;
+constexpr double kLargestFrom_m = 4e-3;
+constexpr double kLargestTo_m = 16e-3;
 constexpr double kTubeSize_m = 3e-3;
 constexpr double kUnheatedFactor = 2.0;
 constexpr int kLeastTubeCells = 2;
@@ -61,7 +67,8 @@ struct HalfAxis {
 
  private:
   void add_core(std::vector<Stretch>& outward) const {
-    SizeLaw size = kCoreSize.scaled(factor);
+    const double largest = std::clamp(core_m / kCellsToCentre, kLargestFrom_m, kLargestTo_m);
+    SizeLaw size = SizeLaw{kFirstSize_m, kGrowth, largest}.scaled(factor);
     if (!heated) size.first_m *= kUnheatedFactor;
     double from = 0;
     std::vector<double> lines = kept_lines_m;

@@ -8,7 +8,7 @@ namespace ringward::testing {
 
 /// A round bare column with bars that fails well before the end of the followed fire.
 [[nodiscard]] inline std::string round_bare_column() {
-  return R"(title = "Round bare column (invented example)"
+  return R"toml(title = "Round bare column (invented example)"
 [section]
 shape = "circular"
 diameter_mm = 200
@@ -28,12 +28,12 @@ curve = "standard"
 duration_min = 120
 [numerics]
 accuracy = "coarse"
-)";
+)toml";
 }
 
 /// A square composite column with bars.
 [[nodiscard]] inline std::string square_column() {
-  return R"(title = "Square column (invented example)"
+  return R"toml(title = "Square column (invented example)"
 [section]
 shape = "square"
 side_mm = 200
@@ -58,12 +58,12 @@ curve = "standard"
 duration_min = 60
 [numerics]
 accuracy = "coarse"
-)";
+)toml";
 }
 
 /// A round column in a confining tube.
 [[nodiscard]] inline std::string round_tubed_column() {
-  return R"(title = "Round tubed column (invented example)"
+  return R"toml(title = "Round tubed column (invented example)"
 [section]
 shape = "circular"
 diameter_mm = 200
@@ -87,7 +87,7 @@ curve = "standard"
 duration_min = 60
 [numerics]
 accuracy = "coarse"
-)";
+)toml";
 }
 
 }  // namespace ringward::testing

@@ -16,10 +16,10 @@ struct ProcessResult {
 
 /// How the real program is started. Output goes to files unless a device is named.
 struct ProcessSetup {
-  std::string stdin_text;
-  std::filesystem::path folder = ".";            ///< where it runs
-  std::map<std::string, std::string> variables;  ///< added to the environment
-  std::string stdout_device;                     ///< e.g. "/dev/full"
+  std::string stdin_text = {};
+  std::filesystem::path folder = ".";                 ///< where it runs
+  std::map<std::string, std::string> variables = {};  ///< added to the environment
+  std::string stdout_device = {};                     ///< e.g. "/dev/full"
   bool close_stdout = false;
   int interrupt_after_ms = 0;  ///< 0: never
 };

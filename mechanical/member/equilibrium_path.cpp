@@ -10,12 +10,16 @@ namespace ringward::mechanical {
 namespace {
 
 constexpr double kResidualTolerance = 1e-9;  // of the reference force
-constexpr int kNewtonLimit = 12;
-constexpr double kFirstStep = 0.05;
+constexpr int kNewtonLimit = 20;
+constexpr int kHalvingLimit = 4;
+constexpr double kFirstStep = 0.1;
 constexpr double kLargestStep = 0.5;  // 0.05 % strain: far below the distance between two peaks
+constexpr double kCornerStep = 1e-3;
+constexpr double kCornerReach = 0.2;
 constexpr double kSmallestStep = 1e-7;
 constexpr double kSmallestWidth = 1e-9;
 constexpr double kForceTolerance = 1e-8;
+constexpr double kMaximumTolerance = 1e-7;
 constexpr double kCrushedStrain = 0.06;  // beyond eps_cu1 of any temperature
 constexpr int kWalkLimit = 4000;
 
@@ -29,13 +33,10 @@ std::optional<PathPoint> EquilibriumPath::project(const Eigen::VectorXd& guess,
                                                   const Eigen::VectorXd& direction) const {
   const Eigen::Index m = model_.equations();
   Eigen::VectorXd q = guess;
-  double previous_norm = 0.0;
+  MemberModel::Linearised at = model_.linearise(q);
   for (int iteration = 0; iteration < kNewtonLimit; ++iteration) {
-    const MemberModel::Linearised at = model_.linearise(q);
     const double norm = at.residual.lpNorm<Eigen::Infinity>();
     if (!std::isfinite(norm)) return std::nullopt;
-    if (iteration > 6 && norm > previous_norm) return std::nullopt;
-    previous_norm = norm;
     Eigen::MatrixXd bordered(m + 1, m + 1);
     bordered.topRows(m) = at.jacobian;
     bordered.bottomRows(1) = direction.transpose();
@@ -50,7 +51,15 @@ std::optional<PathPoint> EquilibriumPath::project(const Eigen::VectorXd& guess,
     right.head(m) = -at.residual;
     const Eigen::VectorXd change = lu.solve(right);
     if (!change.allFinite()) return std::nullopt;
-    q += change;
+    // Fibres that crack or crush bend the residual sharply: shorten what does not improve it.
+    double share = 1.0;
+    for (int halving = 0;; ++halving) {
+      at = model_.linearise(q + share * change);
+      const bool better = at.residual.lpNorm<Eigen::Infinity>() < norm;
+      if (better || halving == kHalvingLimit) break;
+      share *= 0.5;
+    }
+    q += share * change;
   }
   return std::nullopt;
 }
@@ -64,11 +73,35 @@ std::optional<PathPoint> EquilibriumPath::start(double eps0) const {
 PathPoint EquilibriumPath::advance(const PathPoint& from, double& step) const {
   while (std::abs(step) > kSmallestStep) {
     const std::optional<PathPoint> next = project(from.q + step * from.tangent, from.tangent);
-    // A turn of more than 60 degrees means that Newton found another branch.
+    // A turn of more than 60 degrees means that Newton found another branch, or a corner.
     if (next && next->tangent.dot(from.tangent) > 0.5) return *next;
+    if (std::abs(step) < kCornerStep) {
+      if (const std::optional<PathPoint> beyond = turn_corner(from, step)) return *beyond;
+    }
     step *= 0.5;
   }
   throw path_lost("no neighbouring equilibrium found");
+}
+
+// Where bars yield the path has corners, sharper than a right angle at times: no plane across the
+// old direction meets the new one. Mid-height curvature or strain still moves on there, one way or
+// the other; the way back along the old direction is not taken.
+std::optional<PathPoint> EquilibriumPath::turn_corner(const PathPoint& from, double step) const {
+  const double sense = step > 0.0 ? 1.0 : -1.0;
+  for (const double reach : {1.0, 4.0, 16.0}) {
+    for (const Eigen::Index control : {Eigen::Index{1}, Eigen::Index{0}}) {
+      for (const double way : {1.0, -1.0}) {
+        const Eigen::VectorXd axis = Eigen::VectorXd::Unit(from.q.size(), control) * way;
+        const Eigen::VectorXd guess = from.q + sense * reach * kCornerStep * axis;
+        const std::optional<PathPoint> beyond = project(guess, axis);
+        if (!beyond) continue;
+        const Eigen::VectorXd move = beyond->q - from.q;
+        const bool is_back = sense * move.dot(from.tangent) < -0.95 * move.norm();
+        if (!is_back && move.norm() < kCornerReach) return beyond;
+      }
+    }
+  }
+  return std::nullopt;
 }
 
 std::optional<PathPoint> EquilibriumPath::at_force(const PathPoint& from, double scaled_N) const {
@@ -145,7 +178,8 @@ PathPoint EquilibriumPath::refine_maximum(const PathPoint& before, double step) 
       falling_slope = reached ? point->N_slope() : 0.0;
     }
     // The force is within slope x width of the maximum.
-    if (falling_slope < 0.0 && width * std::max(base.N_slope(), -falling_slope) < kForceTolerance) {
+    if (falling_slope < 0.0 &&
+        width * std::max(base.N_slope(), -falling_slope) < kMaximumTolerance) {
       break;
     }
   }

@@ -54,6 +54,7 @@ class EquilibriumPath {
   [[nodiscard]] PathPoint refine_maximum(const PathPoint& before, double step) const;
   /// One step of at most `step` (negative: backward); shortens it until Newton converges.
   [[nodiscard]] PathPoint advance(const PathPoint& from, double& step) const;
+  [[nodiscard]] std::optional<PathPoint> turn_corner(const PathPoint& from, double step) const;
 
   const MemberModel& model_;
 };

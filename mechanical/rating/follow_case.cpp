@@ -48,7 +48,9 @@ class CaseFollower {
   bool load() {
     const Standing cold = standing_.load_cold(*in_time_.at(0.0));
     if (cold == Standing::lost) throw lost_at(0.0);
-    if (cold == Standing::stands) return true;
+    if (cold == Standing::stands && !closes_gap(standing_)) return true;
+    if (cold == Standing::stands && pass_event(standing_)) return true;
+    if (cold == Standing::stands) return false;
     history_.fall_s = 0.0;
     if (sampling_) add_overloaded();
     return false;

@@ -111,11 +111,12 @@ void yield_model(NoticeWriter& write, const Column& column) {
 void unordered_bounds(NoticeWriter& write, const Rating& rating) {
   const auto or_end = [&](const std::optional<double>& s) { return s.value_or(rating.followed_s); };
   if (or_end(rating.bounds.yield_s) >= or_end(rating.bounds.none_s) - kOneSecond) return;
-  write.note("confinement-softens",
-             "With full tube pressure this column falls sooner than without: the law for confined "
-             "concrete moves its peak to a larger strain and so lowers its stiffness, which a "
-             "slender column misses more than it gains from the strength.",
-             "richart1928");
+  write.note(
+      "confinement-softens",
+      "The model \"yield\" rates this column below \"none\" and is no upper bound here: the law "
+      "for confined concrete moves the peak of its hot layers to larger strains, which costs "
+      "the section and its stiffness more than a small pressure gives.",
+      "richart1928");
 }
 
 void reserve(NoticeWriter& write, const SingleRating& chosen) {

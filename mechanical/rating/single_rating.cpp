@@ -63,8 +63,8 @@ bool has_event(const CaseHistory& history, double t_s) {
 
 std::string criterion_of(const CaseHistory& governing, const Column& column) {
   if (!governing.fall_s) return "none reached";
-  if (*governing.fall_s == 0.0) return "load above the resistance at 20 C";
   if (governing.fell_with_gap) return "loss of confinement when the end gap closes";
+  if (*governing.fall_s == 0.0) return "load above the resistance at 20 C";
   const Load& load = column.load;
   const bool eccentric = load.moments_given
                              ? load.moment_x_Nm != 0.0 || load.moment_y_Nm != 0.0

@@ -1,6 +1,7 @@
+#include "mechanical/rating/rating.hpp"
+
 #include <catch2/catch.hpp>
 
-#include "mechanical/rating/rating.hpp"
 #include "tests/support/columns.hpp"
 #include "thermal/base/units.hpp"
 
@@ -57,10 +58,10 @@ TEST_CASE("the history ends at the fall, where capacity meets the load") {
   }
 }
 
-TEST_CASE("more confinement never shortens the life of a stocky column") {
-  for (const double load_N : {3.0e6, 4.2e6, 5.0e6}) {
+TEST_CASE("more confinement never shortens the life of a stocky column that lives on it") {
+  const auto or_end = [](const std::optional<double>& s) { return s.value_or(7200.0); };
+  for (const double load_N : {4.2e6, 5.0e6}) {
     const Rating rating = rate(stub(load_N), testing::standard_fire(120), Accuracy::standard);
-    const auto or_end = [](const std::optional<double>& s) { return s.value_or(7200.0); };
     CAPTURE(load_N);
     // Equal within the resolution of the search where the tube has no grip.
     CHECK(or_end(rating.bounds.none_s) <= or_end(rating.bounds.contact_s) + 0.6);
@@ -68,15 +69,60 @@ TEST_CASE("more confinement never shortens the life of a stocky column") {
   }
 }
 
-TEST_CASE("under all-round heating without confinement the capacity never rises") {
+TEST_CASE("a bound that comes out of order is named, never hidden") {
+  // After an hour the tube's pressure is small, and the law for confined concrete moves the peaks
+  // of hot layers to strains where the core is past its own: "yield" then falls below "none".
+  const Rating rating = rate(stub(3.0e6), testing::standard_fire(150), Accuracy::standard);
+  REQUIRE(*rating.bounds.yield_s < *rating.bounds.none_s - 1.0);
+  CHECK(has_notice(rating, "confinement-softens"));
+}
+
+namespace {
+
+std::vector<double> capacities_by_minute(const Column& column, Accuracy accuracy) {
+  const thermal::FireExposure fire = testing::standard_fire(60);
+  const auto history = thermal::solve_heat_flow(column.section, fire, {.accuracy = accuracy});
+  std::vector<double> times_s;
+  for (int k = 0; k <= 60; ++k) times_s.push_back(60.0 * k);
+  std::vector<double> result;
+  for (const CapacityState& state : capacities(column, history, times_s)) {
+    result.push_back(state.capacity_N);
+  }
+  return result;
+}
+
+double largest_rise(const std::vector<double>& values) {
+  double lowest = values.front();
+  double rise = 0.0;
+  for (const double value : values) {
+    rise = std::max(rise, value - lowest);
+    lowest = std::min(lowest, value);
+  }
+  return rise / values.front();
+}
+
+}  // namespace
+
+TEST_CASE("under all-round heating without confinement the capacity does not rise") {
+  // 0.1 % of the cold value is what thermal self-stress may do to a stocky or a slender column.
   Column column = testing::round_column({.bars = 8});
   column.load.axial_N = 1.2e6;
-  const Rating rating = rate(column, testing::standard_fire(240), Accuracy::standard);
-  for (std::size_t k = 1; k < rating.chosen.history.size(); ++k) {
-    // The project asks for 0.1 % of the cold value: what thermal self-stress may do.
-    CHECK(rating.chosen.history[k].capacity_N <=
-          rating.chosen.history[k - 1].capacity_N + 1e-3 * rating.chosen.cold_capacity_N);
+  for (const double length_m : {0.4, 4.0}) {
+    column.member = {length_m, length_m, length_m / 400.0};
+    CAPTURE(length_m);
+    CHECK(largest_rise(capacities_by_minute(column, Accuracy::standard)) < 1e-3);
   }
+}
+
+TEST_CASE("at medium slenderness the capacity rises a little in the first minutes, on any grid") {
+  // The peak strain of concrete grows from 0.25 % at 20 C to 0.4 % at 100 C at full strength
+  // (EN 1992-1-2 Table 3.1), so the warmed outer ring still carries when the core is at its peak.
+  // 0.19 % was found; a grid of twice the cells agrees to a hundredth of a percent.
+  Column column = testing::round_column({.bars = 8});
+  column.load.axial_N = 1.2e6;
+  const double rise = largest_rise(capacities_by_minute(column, Accuracy::standard));
+  CHECK(rise < 2.5e-3);
+  CHECK(rise == Approx(largest_rise(capacities_by_minute(column, Accuracy::fine))).margin(1e-4));
 }
 
 TEST_CASE("a load above the cold capacity is a resistance of zero, with its notice") {
@@ -110,12 +156,17 @@ TEST_CASE("end gaps of 10 mm close early and take the confinement with them") {
 
 TEST_CASE("the closing of the end gap ends a column that lives on its confinement") {
   Column column = stub(6.0e6);
-  column.section.tube->end_gap_m = 0.002;
-  const Rating closing = rate(column, testing::standard_fire(30), Accuracy::standard);
   column.section.tube->end_gap_m = 0.1;
   const Rating open = rate(column, testing::standard_fire(30), Accuracy::standard);
+  column.section.tube->end_gap_m = 0.014;
+  const Rating closing = rate(column, testing::standard_fire(30), Accuracy::standard);
   CHECK(minutes(closing.chosen.fire_resistance_s) < minutes(open.chosen.fire_resistance_s) - 1.0);
   CHECK(closing.chosen.criterion == "loss of confinement when the end gap closes");
+  // So small a gap closes under the load itself, before the fire.
+  column.section.tube->end_gap_m = 0.002;
+  const Rating at_once = rate(column, testing::standard_fire(30), Accuracy::standard);
+  CHECK(*at_once.chosen.fire_resistance_s == 0.0);
+  CHECK(has_notice(at_once, "end-gap-closed"));
 }
 
 TEST_CASE("a column heated on one side is rated the same from whichever side") {
@@ -123,7 +174,9 @@ TEST_CASE("a column heated on one side is rated the same from whichever side") {
     thermal::FireExposure fire = testing::standard_fire(180);
     fire.exposed.faces.fill(thermal::FaceCondition::ambient);
     fire.exposed.faces[static_cast<std::size_t>(heated)] = thermal::FaceCondition::heated;
-    return rate(testing::square_concrete_column(0.25), fire, Accuracy::coarse);
+    Column column = testing::square_concrete_column(0.25);
+    column.load.axial_N = 1.5e6;
+    return rate(column, fire, Accuracy::coarse);
   };
   const Rating left = rated(thermal::Face::left);
   const Rating top = rated(thermal::Face::top);
@@ -138,8 +191,8 @@ TEST_CASE("an eccentricity and its mirror image give the same resistance") {
     Column column = testing::square_concrete_column(0.3);
     column.load.eccentricity_x_m = e_x_m;
     column.load.eccentricity_y_m = e_y_m;
-    return minutes(rate(column, testing::standard_fire(120), Accuracy::coarse)
-                       .chosen.fire_resistance_s);
+    return minutes(
+        rate(column, testing::standard_fire(120), Accuracy::coarse).chosen.fire_resistance_s);
   };
   const double along_x = rated(0.03, 0.0);
   // Symmetric section: only the resolution of the search (0.005 min) and rounding differ.
@@ -168,7 +221,8 @@ TEST_CASE("the stated uncertainty covers the distance to a finer solution") {
   for (const double load_N : {3.0e6, 3.6e6}) {
     const Rating standard = rate(stub(load_N), testing::standard_fire(120), Accuracy::standard);
     const Rating fine = rate(stub(load_N), testing::standard_fire(120), Accuracy::fine);
-    const double error_s = std::abs(*standard.chosen.fire_resistance_s - *fine.chosen.fire_resistance_s);
+    const double error_s =
+        std::abs(*standard.chosen.fire_resistance_s - *fine.chosen.fire_resistance_s);
     CAPTURE(load_N, error_s, standard.uncertainty_s);
     CHECK(error_s <= standard.uncertainty_s);
   }

@@ -37,6 +37,10 @@ HeatEquation::HeatEquation(HeatProblem problem) : problem_(std::move(problem)) {
   connect();
   build_pattern();
   find_entries();
+  if (!mixed_.empty()) {
+    pure_core_.emplace(std::vector<MaterialShare>{{problem_.core, 1.0}});
+    pure_shape_.emplace(std::vector<MaterialShare>{{problem_.steel_shape, 1.0}});
+  }
   states_.resize(size());
   outside_C_.resize(problem_.conditions.size());
   peaks_ = initial_state();
@@ -88,6 +92,16 @@ double HeatEquation::resistance_m2K_W(std::size_t a, std::size_t b) const {
   return core_and_tube ? problem_.contact_resistance_m2K_W : 0.0;
 }
 
+bool HeatEquation::is_cut_by_shape(std::size_t a, std::size_t b) const {
+  const auto is_cut = [](const Cell& cell) {
+    return cell.steel_fraction > 0.0 && cell.steel_fraction < 1.0;
+  };
+  const Cell& first = grid().cells[a];
+  const Cell& second = grid().cells[b];
+  return problem_.in_steel_shape && first.layer == Layer::core && second.layer == Layer::core &&
+         (is_cut(first) || is_cut(second));
+}
+
 void HeatEquation::connect() {
   for (std::size_t j = 0; j < grid().count_2(); ++j) {
     for (std::size_t i = 0; i < grid().count_1(); ++i) {
@@ -126,7 +140,10 @@ void HeatEquation::connect_pair(CellIndex at, Side side) {
   const std::size_t a = grid().index(at.i, at.j);
   const std::size_t b = grid().index(other->i, other->j);
   const double length = face_length_m(grid(), at, side);
-  if (&curve(a) == &curve(b)) {
+  if (is_cut_by_shape(a, b)) {
+    mixed_.push_back(
+        {a, b, length, mixed_path(grid(), at, *other, side, problem_.in_steel_shape), {}});
+  } else if (&curve(a) == &curve(b)) {
     const double distance =
         half_distance_m(grid(), at, side) + half_distance_m(grid(), *other, side);
     inner_.push_back({a, b, length / distance, {}});
@@ -154,6 +171,10 @@ void HeatEquation::build_pattern() {
     add(face.a, face.b);
     add(face.b, face.a);
   }
+  for (const MixedFace& face : mixed_) {
+    add(face.a, face.b);
+    add(face.b, face.a);
+  }
   for (const Interface& face : interfaces_) {
     for (std::size_t column : {face.a.near, face.a.far, face.b.near, face.b.far}) {
       add(face.a.near, column);
@@ -170,9 +191,11 @@ void HeatEquation::build_pattern() {
 }
 
 void HeatEquation::find_entries() {
-  for (InnerFace& f : inner_) {
+  const auto find_pair = [this](auto& f) {
     f.entries = {entry(f.a, f.a), entry(f.b, f.a), entry(f.a, f.b), entry(f.b, f.b)};
-  }
+  };
+  for (InnerFace& f : inner_) find_pair(f);
+  for (MixedFace& f : mixed_) find_pair(f);
   for (Interface& f : interfaces_) {
     std::size_t k = 0;
     for (std::size_t column : {f.a.near, f.a.far, f.b.near, f.b.far}) {
@@ -259,6 +282,10 @@ InterfaceFlow HeatEquation::flow(const Interface& face) const {
                         face.resistance_m2K_W);
 }
 
+MixedFlow HeatEquation::flow(const MixedFace& face) const {
+  return mixed_flow(face.path, *pure_core_, *pure_shape_, states_[face.a].T_C, states_[face.b].T_C);
+}
+
 void HeatEquation::rate(double t_s, std::span<const double> u, std::span<double> du_dt) {
   update_states(u);
   update_outside(t_s);
@@ -272,6 +299,11 @@ void HeatEquation::rate(double t_s, std::span<const double> u, std::span<double>
     const double heat = f.length_m * flow(f).flux_W_m2;
     du_dt[f.a.near] -= heat;
     du_dt[f.b.near] += heat;
+  }
+  for (const MixedFace& f : mixed_) {
+    const double heat = f.length_m * flow(f).flux_W_m2;
+    du_dt[f.a] -= heat;
+    du_dt[f.b] += heat;
   }
   for (const SurfaceFace& f : surface_) du_dt[f.in.near] += f.length_m * flow(f, t_s).flux_W_m2;
   for (std::size_t k = 0; k < u.size(); ++k) du_dt[k] *= weight_[k];
@@ -294,6 +326,7 @@ void HeatEquation::jacobian(double t_s, std::span<const double> u, std::span<dou
     values[f.entries[3]] -= by_b * weight_[f.b];
   }
   add_interfaces(values);
+  add_mixed(values);
   add_surface(t_s, values);
 }
 
@@ -311,6 +344,18 @@ void HeatEquation::add_interfaces(std::span<double> values) const {
       values[f.entries[2 * k]] -= by_column[k] * weight_[f.a.near];
       values[f.entries[2 * k + 1]] += by_column[k] * weight_[f.b.near];
     }
+  }
+}
+
+void HeatEquation::add_mixed(std::span<double> values) const {
+  for (const MixedFace& f : mixed_) {
+    const MixedFlow between = flow(f);
+    const double by_a = f.length_m * between.slope_a * states_[f.a].T_slope;
+    const double by_b = f.length_m * between.slope_b * states_[f.b].T_slope;
+    values[f.entries[0]] -= by_a * weight_[f.a];
+    values[f.entries[1]] += by_a * weight_[f.b];
+    values[f.entries[2]] -= by_b * weight_[f.a];
+    values[f.entries[3]] += by_b * weight_[f.b];
   }
 }
 

@@ -10,6 +10,7 @@
 #include "thermal/enthalpy_curve.hpp"
 #include "thermal/grid/distances.hpp"
 #include "thermal/grid/orthogonal_grid.hpp"
+#include "thermal/mixed_face.hpp"
 
 namespace ringward::thermal {
 
@@ -22,6 +23,8 @@ struct HeatProblem {
   /// By layer; a law that no cell needs may be null. The last one fills steel_fraction of a cell.
   ThermalLawPtr core, tube, protection, steel_shape;
   double contact_resistance_m2K_W = 0;  ///< between core and tube
+  /// Where the steel shape is, for cells that it cuts; without it these conduct as their mixture.
+  InShape in_steel_shape;
 
   std::vector<SurfaceCondition> conditions;
   /// For each Side of the grid the condition (index or kNoFlow) of each cell along it; an empty
@@ -104,6 +107,12 @@ class HeatEquation {
     double length_m, resistance_m2K_W;
     std::array<std::size_t, 8> entries;  // rows a, b in columns a near, a far, b near, b far
   };
+  struct MixedFace {
+    std::size_t a, b;
+    double length_m;
+    MixedPath path;
+    std::array<std::size_t, 4> entries;  // as of an InnerFace
+  };
   struct SurfaceFace {
     FaceStencil in;
     double length_m;
@@ -115,6 +124,7 @@ class HeatEquation {
   void assign_curves();
   void connect();
   void connect_pair(CellIndex at, Side side);
+  [[nodiscard]] bool is_cut_by_shape(std::size_t a, std::size_t b) const;
   void connect_surface(CellIndex at, Side side);
   void build_pattern();
   [[nodiscard]] std::size_t entry(std::size_t row, std::size_t column) const;
@@ -129,7 +139,9 @@ class HeatEquation {
   }
   [[nodiscard]] SurfaceFlow flow(const SurfaceFace& face, double t_s) const;
   [[nodiscard]] InterfaceFlow flow(const Interface& face) const;
+  [[nodiscard]] MixedFlow flow(const MixedFace& face) const;
   void add_interfaces(std::span<double> values) const;
+  void add_mixed(std::span<double> values) const;
   void add_surface(double t_s, std::span<double> values) const;
 
   HeatProblem problem_;
@@ -139,6 +151,8 @@ class HeatEquation {
   std::vector<Point> middle_;
   std::vector<InnerFace> inner_;
   std::vector<Interface> interfaces_;
+  std::vector<MixedFace> mixed_;
+  std::optional<EnthalpyCurve> pure_core_, pure_shape_;  // for the mixed faces
   std::vector<SurfaceFace> surface_;
   SparsePattern pattern_;
 

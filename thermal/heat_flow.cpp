@@ -5,6 +5,7 @@
 
 #include "thermal/base/error.hpp"
 #include "thermal/grid/section_grid.hpp"
+#include "thermal/grid/steel_shape_cells.hpp"
 #include "thermal/heat_flow_run.hpp"
 #include "thermal/materials/thermal_law.hpp"
 #include "thermal/temperature_history.hpp"
@@ -56,7 +57,13 @@ HeatProblem heat_problem_of(const Section& section, const FireExposure& fire,
     problem.tube = steel_law_en1993();
     problem.contact_resistance_m2K_W = section.tube->contact_resistance_m2K_W;
   }
-  if (section.steel_shape) problem.steel_shape = steel_law_en1993();
+  if (section.steel_shape) {
+    problem.steel_shape = steel_law_en1993();
+    problem.in_steel_shape = [parts = steel_shape_parts(*section.steel_shape)](const Point& point) {
+      return std::any_of(parts.begin(), parts.end(),
+                         [&](const ConvexPolygon& part) { return contains(part, point); });
+    };
+  }
   if (section.protection) problem.protection = protection_law(*section.protection);
   problem.conditions = conditions_of(fire);
   problem.initial_C = fire.ambient.temperature_C;

@@ -22,8 +22,7 @@ Probe mean_of(const OrthogonalGrid& grid, const std::vector<std::size_t>& cells)
   return mean;
 }
 
-/// A maximal rectangle of tube cells that is as wide as the wall: one row or column of it, or a
-/// corner block, where the row and the column of a cell both run on along the wall.
+/// Unbroken tube cells along one axis, [from, to).
 struct Run {
   std::size_t from = 0, to = 0;
 };

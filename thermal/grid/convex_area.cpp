@@ -65,6 +65,16 @@ ConvexPolygon clipped(const ConvexPolygon& polygon, const HalfPlane& half_plane)
   return kept;
 }
 
+bool contains(const ConvexPolygon& polygon, const Point& point) {
+  for (std::size_t k = 0; k < polygon.size(); ++k) {
+    const Point& a = polygon[k];
+    const Point& b = polygon[(k + 1) % polygon.size()];
+    const Point side{b.x_m - a.x_m, b.y_m - a.y_m};
+    if (cross(side, {point.x_m - a.x_m, point.y_m - a.y_m}) < 0.0) return false;
+  }
+  return true;
+}
+
 double area_within_circle_m2(const ConvexPolygon& polygon, double radius_m) {
   double area = 0;
   for (std::size_t k = 0; k < polygon.size(); ++k) {

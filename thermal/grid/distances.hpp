@@ -58,6 +58,8 @@ struct CellIndex {
   return extent * grid.faces_1[side == Side::low_1 ? at.i : at.i + 1];
 }
 
+/// A point given along the axes in the section's coordinates; axisymmetric: (r, 0).
+[[nodiscard]] Point section_point(const OrthogonalGrid& grid, double along_1, double along_2);
 /// The middle of a face of a cell in the section's coordinates; axisymmetric: (r, 0).
 [[nodiscard]] Point face_point(const OrthogonalGrid& grid, CellIndex at, Side side);
 /// The middle of a cell in the section's coordinates; axisymmetric: (r, 0).

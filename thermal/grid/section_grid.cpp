@@ -28,6 +28,9 @@ constexpr double kProtectionCells = 6.0;
 constexpr SizeLaw kArcSize{.first_m = 6e-3, .growth = 0.2, .largest_m = 30e-3};
 // One dimension costs little, so it is solved finer.
 constexpr double kAxisymmetricFactor = 0.5;
+// Cells cut by a steel shape converge with first order only, so that they are taken smaller.
+constexpr double kCutCircleFactor = 0.6;
+constexpr double kCutRectangleFactor = 0.8;
 constexpr double kSameLine_m = 1e-6;
 
 double factor_of(const Resolution& resolution) {
@@ -130,7 +133,9 @@ class RectangleGrid {
         exposed_(exposed),
         factor_(factor_of(resolution)),
         symmetry_(rectangle_symmetry(section, exposed)) {
-    if (section.steel_shape) edges_ = steel_shape_edges(*section.steel_shape);
+    if (!section.steel_shape) return;
+    edges_ = steel_shape_edges(*section.steel_shape);
+    if (edges_.x_m.empty()) factor_ *= kCutRectangleFactor;
   }
 
   [[nodiscard]] SectionGrid build() const {
@@ -244,7 +249,10 @@ SectionGrid circle_grid(const Section& section, const ExposedParts& exposed,
                         const Resolution& resolution) {
   const CirclePart part = circle_part(section, exposed);
   const bool one_dimensional = part.symmetry == Symmetry::axisymmetric;
-  const double factor = factor_of(resolution) * (one_dimensional ? kAxisymmetricFactor : 1.0);
+  const double for_kind = one_dimensional       ? kAxisymmetricFactor
+                          : section.steel_shape ? kCutCircleFactor
+                                                : 1.0;
+  const double factor = factor_of(resolution) * for_kind;
   const double core_m = 0.5 * section.core_width_m();
   const double tube_m = section.tube_thickness_m();
   const HalfAxis radius{core_m, tube_m, protection_m(section), true, factor, {}};

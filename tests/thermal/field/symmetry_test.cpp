@@ -142,9 +142,6 @@ TEST_CASE("Turning the heated arc of a circle turns the temperatures") {
   CHECK(plain.T_C({0.0, 0.09}, 2700) > plain.T_C({0.0, -0.09}, 2700) + 100.0);
 }
 
-// Two arcs of different middles leave no mirror axis. The whole circle then runs on its own grid,
-// so the comparison with the half circle, where the second arc is moved to share the axis, is not
-// of like with like: instead the built-in arc is given a length of zero influence, opposite.
 TEST_CASE("Symmetry is found where outline, exposure and steel shape share it, and only there") {
   const ExposedParts all;
   Section circle = tubed(Shape::circular, 0.4, 0.005);

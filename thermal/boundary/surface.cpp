@@ -9,7 +9,7 @@ namespace ringward::thermal {
 namespace {
 
 constexpr int kMostIterations = 60;
-constexpr double kFaceError_K = 1e-9;
+constexpr double kFaceError_K = 1e-7;  // of the last step; Newton leaves far less
 constexpr double kLowest_C = -units::kKelvinOffset;
 constexpr double kHighest_C = 5000.0;
 

@@ -56,7 +56,7 @@ std::vector<OutputFile> pictures(const FieldOptions& options, const ColumnInput&
                                  .fire = input.curve->name(),
                                  .section = &input.column.section,
                                  .exposed = &input.fire.exposed};
-    files.push_back({options.picture, section_picture(subject, history.grid(), field.states)});
+    files.push_back({options.picture, section_picture(subject, history, field.states)});
   }
   return files;
 }

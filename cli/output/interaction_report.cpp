@@ -23,7 +23,7 @@ constexpr int kDigitsMoment = 2;
 std::string axis_word(Axis axis) { return axis == Axis::x ? "x" : "y"; }
 
 std::string corner_line(const std::string& what, const InteractionPoint& point) {
-  return "  " + what + std::string(30 - what.size(), ' ') +
+  return "  " + what + std::string(32 - what.size(), ' ') +
          "N = " + fixed(units::kN_from_N(point.axial_N), kDigitsForce) +
          " kN, M = " + fixed(units::kNm_from_Nm(point.moment_Nm), kDigitsMoment) + " kNm\n";
 }

@@ -58,11 +58,10 @@ class PatchPainter {
 };
 
 // The band of every patch.
-std::vector<int> bands_of(const WholeSection& whole, const std::vector<double>& cells_C,
-                          const ColourBands& bands) {
+std::vector<int> bands_of(const std::vector<double>& patches_C, const ColourBands& bands) {
   std::vector<int> result;
-  result.reserve(whole.source_cell.size());
-  for (const std::size_t cell : whole.source_cell) result.push_back(bands.band_of(cells_C[cell]));
+  result.reserve(patches_C.size());
+  for (const double T_C : patches_C) result.push_back(bands.band_of(T_C));
   return result;
 }
 
@@ -110,10 +109,10 @@ std::string band_edges(const WholeSection& whole, const std::vector<int>& band,
 
 }  // namespace
 
-std::string temperature_patches(const WholeSection& whole, const std::vector<double>& cells_C,
+std::string temperature_patches(const WholeSection& whole, const std::vector<double>& patches_C,
                                 const ColourBands& bands, double px_per_m) {
   const PatchPainter painter(whole, px_per_m);
-  const std::vector<int> band = bands_of(whole, cells_C, bands);
+  const std::vector<int> band = bands_of(patches_C, bands);
   std::string text;
   for (const auto& [number, path] : band_paths(whole, band, painter)) {
     // The stroke of the same colour closes the hairlines between neighbouring shapes.

@@ -24,6 +24,7 @@ constexpr double kPanelHeading_px = 26;
 constexpr double kAroundSection_px = 20;
 constexpr double kSingleSection_px = 440;
 constexpr double kOneOfManySections_px = 270;
+constexpr double kWidestPatch_px = 3;
 constexpr std::size_t kPanelsInRow = 3;
 constexpr std::size_t kLongestTitle = 90;
 
@@ -149,8 +150,29 @@ std::string footer(const thermal::Section& section, const Page& page, double y) 
                         "defects.");
 }
 
-std::string panel(const PictureSubject& subject, const WholeSection& whole, const FieldState& state,
-                  const ColourBands& bands, const Page& page) {
+// What all panels have in common.
+struct Drawing {
+  Page page;
+  WholeSection whole;
+  ColourBands bands;
+};
+
+std::vector<double> sampled(const WholeSection& whole, const thermal::TemperatureHistory& history,
+                            double time_s) {
+  std::vector<double> patches_C;
+  patches_C.reserve(whole.count_1() * whole.count_2());
+  for (std::size_t j = 0; j < whole.count_2(); ++j) {
+    for (std::size_t i = 0; i < whole.count_1(); ++i) {
+      patches_C.push_back(history.T_C(middle(whole, i, j), time_s));
+    }
+  }
+  return patches_C;
+}
+
+std::string panel(const PictureSubject& subject, const Drawing& drawing,
+                  const thermal::TemperatureHistory& history, const FieldState& state) {
+  const Page& page = drawing.page;
+  const std::vector<double> patches_C = sampled(drawing.whole, history, state.time_s);
   const double middle_y = kPanelHeading_px + kAroundSection_px + page.section_depth / 2;
   const std::string heading = fmt::format(
       "{} min, gas {} \xC2\xB0"
@@ -159,7 +181,7 @@ std::string panel(const PictureSubject& subject, const WholeSection& whole, cons
   return text_at(page.panel_width() / 2, 16, "font-size=\"13\" text-anchor=\"middle\"", heading) +
          fmt::format("<g transform=\"translate({:.2f} {:.2f})\">\n", page.panel_width() / 2,
                      middle_y) +
-         temperature_patches(whole, state.cells_C, bands, page.px_per_m) +
+         temperature_patches(drawing.whole, patches_C, drawing.bands, page.px_per_m) +
          section_outlines(*subject.section, page.px_per_m) +
          heated_outline(*subject.section, *subject.exposed, page.px_per_m) + "</g>\n";
 }
@@ -176,11 +198,12 @@ ColourBands bands_for(const std::vector<FieldState>& states) {
 
 }  // namespace
 
-std::string section_picture(const PictureSubject& subject, const thermal::OrthogonalGrid& grid,
+std::string section_picture(const PictureSubject& subject,
+                            const thermal::TemperatureHistory& history,
                             const std::vector<FieldState>& states) {
   const Page page = page_for(*subject.section, states.size());
-  const WholeSection whole = unfold(grid);
-  const ColourBands bands = bands_for(states);
+  const Drawing drawing{page, refined(unfold(history.grid()), kWidestPatch_px / page.px_per_m),
+                        bands_for(states)};
   std::string svg = fmt::format(
       "<svg xmlns=\"http://www.w3.org/2000/svg\" viewBox=\"0 0 {0:.0f} {1:.0f}\" width=\"{0:.0f}\" "
       "height=\"{1:.0f}\" font-family=\"Helvetica, Arial, sans-serif\">\n"
@@ -191,9 +214,9 @@ std::string section_picture(const PictureSubject& subject, const thermal::Orthog
     const double x = kMargin_px + static_cast<double>(k % page.columns) * page.panel_width();
     const double y = kHeader_px + static_cast<double>(k / page.columns) * page.panel_height();
     svg += fmt::format("<g transform=\"translate({:.2f} {:.2f})\">\n", x, y) +
-           panel(subject, whole, states[k], bands, page) + "</g>\n";
+           panel(subject, drawing, history, states[k]) + "</g>\n";
   }
-  svg += legend(bands, kMargin_px + page.panels_width() + 12, kHeader_px + 36);
+  svg += legend(drawing.bands, kMargin_px + page.panels_width() + 12, kHeader_px + 36);
   return svg + footer(*subject.section, page, page.height() - kFooter_px + 16) + "</svg>\n";
 }
 

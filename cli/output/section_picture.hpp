@@ -5,8 +5,8 @@
 
 #include "cli/output/field_states.hpp"
 #include "thermal/boundary/exposure.hpp"
-#include "thermal/grid/orthogonal_grid.hpp"
 #include "thermal/section/section.hpp"
+#include "thermal/temperature_history.hpp"
 
 namespace ringward::cli {
 
@@ -19,9 +19,10 @@ struct PictureSubject {
 };
 
 /// The temperature field of the whole section as an SVG picture, drawn to scale: one panel a time,
-/// filled temperature bands with a legend in C, bars, tube and embedded shape.
+/// filled temperature bands with a legend in C (values
+/// between cells interpolated as for probes), bars, tube and embedded shape.
 [[nodiscard]] std::string section_picture(const PictureSubject& subject,
-                                          const thermal::OrthogonalGrid& grid,
+                                          const thermal::TemperatureHistory& history,
                                           const std::vector<FieldState>& states);
 
 }  // namespace ringward::cli

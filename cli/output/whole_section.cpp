@@ -51,14 +51,14 @@ Point before_image(const Image& image, const Point& p) {
   return {image.xx * p.x_m + image.yx * p.y_m, image.xy * p.x_m + image.yy * p.y_m};
 }
 
-std::vector<double> divided(const std::vector<double>& angles) {
+std::vector<double> divided(const std::vector<double>& lines, double widest) {
   std::vector<double> fine;
-  for (std::size_t j = 0; j + 1 < angles.size(); ++j) {
-    const double width = angles[j + 1] - angles[j];
-    const auto parts = static_cast<int>(std::ceil(width / kWidestPatch_rad - kSameLine));
-    for (int k = 0; k < parts; ++k) fine.push_back(angles[j] + width * k / parts);
+  for (std::size_t j = 0; j + 1 < lines.size(); ++j) {
+    const double width = lines[j + 1] - lines[j];
+    const auto parts = static_cast<int>(std::ceil(width / widest - kSameLine));
+    for (int k = 0; k < parts; ++k) fine.push_back(lines[j] + width * k / parts);
   }
-  fine.push_back(angles.back());
+  fine.push_back(lines.back());
   return fine;
 }
 
@@ -71,7 +71,7 @@ std::vector<double> whole_turn(const OrthogonalGrid& grid) {
   }
   angles = merged(std::move(angles));
   angles.push_back(angles.front() + kFullTurn_rad);
-  return divided(angles);
+  return divided(angles, kWidestPatch_rad);
 }
 
 void add_image_of_lines(const OrthogonalGrid& grid, const Image& image, WholeSection& whole) {
@@ -146,8 +146,9 @@ WholeSection unfold(const OrthogonalGrid& grid) {
   WholeSection whole;
   whole.kind = grid.kind;
   if (grid.symmetry == thermal::Symmetry::axisymmetric) {
+    whole.is_rings = true;
     whole.lines_1 = grid.faces_1;
-    whole.lines_2 = divided({0.0, kFullTurn_rad});
+    whole.lines_2 = divided({0.0, kFullTurn_rad}, kWidestPatch_rad);
     find_rings(whole);
     return whole;
   }
@@ -161,6 +162,25 @@ WholeSection unfold(const OrthogonalGrid& grid) {
   }
   find_sources(grid, whole);
   return whole;
+}
+
+WholeSection refined(const WholeSection& whole, double widest_m) {
+  const bool polar = whole.kind == GridKind::polar;
+  WholeSection fine;
+  fine.kind = whole.kind;
+  fine.is_rings = whole.is_rings;
+  fine.lines_1 = divided(whole.lines_1, widest_m);
+  fine.lines_2 = whole.lines_2;
+  if (whole.is_rings) return fine;
+  fine.lines_2 = divided(whole.lines_2, polar ? widest_m / whole.lines_1.back() : widest_m);
+  return fine;
+}
+
+Point middle(const WholeSection& whole, std::size_t i, std::size_t j) {
+  const double middle_1 = 0.5 * (whole.lines_1[i] + whole.lines_1[i + 1]);
+  const double middle_2 = 0.5 * (whole.lines_2[j] + whole.lines_2[j + 1]);
+  if (whole.kind == GridKind::cartesian) return {middle_1, middle_2};
+  return {middle_1 * std::cos(middle_2), middle_1 * std::sin(middle_2)};
 }
 
 }  // namespace ringward::cli

@@ -10,6 +10,7 @@ namespace ringward::cli {
 /// The whole section as one structured grid, put together from the solved part and its images.
 struct WholeSection {
   thermal::GridKind kind = thermal::GridKind::cartesian;
+  bool is_rings = false;        ///< nothing changes with the angle
   std::vector<double> lines_1;  ///< x [m] or r [m], increasing
   std::vector<double> lines_2;  ///< y [m] or angle [rad], increasing; angles cover one full turn
   /// The solved cell that patch (i, j) shows, at i + j * count_1().
@@ -27,5 +28,13 @@ struct WholeSection {
 /// Mirrors the solved part into the whole section. Arcs of polar grids are divided so that no
 /// patch spans more than 5 degrees and straight edges stay close to the circle.
 [[nodiscard]] WholeSection unfold(const thermal::OrthogonalGrid& grid);
+
+/// The same section with more lines between the present ones, for drawing.
+/// @param widest_m widest patch along an axis [m]; for angles, its arc at the outer radius [m]
+/// @return without `source_cell`: the new patches are finer than the cells
+[[nodiscard]] WholeSection refined(const WholeSection& whole, double widest_m);
+
+/// The middle of patch (i, j).
+[[nodiscard]] thermal::Point middle(const WholeSection& whole, std::size_t i, std::size_t j);
 
 }  // namespace ringward::cli

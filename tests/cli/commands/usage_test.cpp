@@ -163,7 +163,8 @@ TEST_CASE("What new prints can be rated at once, for every shape", "[cli]") {
 TEST_CASE("explain lists the keys, explains one, and refuses an unknown one with 3", "[cli]") {
   const ProcessResult list = run_ringward({"explain"});
   CHECK(list.exit_code == 0);
-  CHECK(contains(list.out, "tube.thickness_mm"));
+  CHECK(contains(list.out, "\n[tube]"));
+  CHECK(contains(list.out, "\n  thickness_mm "));
   const ProcessResult one = run_ringward({"explain", "tube.thickness_mm"});
   CHECK(one.exit_code == 0);
   CHECK(contains(one.out, "mm"));

@@ -82,3 +82,17 @@ TEST_CASE("Half a turn is mirrored about its slanted axis", "[cli]") {
     CHECK(whole.source(0, j) == (near_axis ? 0u : 1u));
   }
 }
+
+TEST_CASE("More lines for drawing keep the lines that were there", "[cli]") {
+  WholeSection whole;
+  whole.kind = GridKind::cartesian;
+  whole.lines_1 = {-0.1, 0.0, 0.025};
+  whole.lines_2 = {0.0, 0.01};
+  const WholeSection fine = refined(whole, 0.02);
+  CHECK(fine.count_1() == 5 + 2);
+  CHECK(fine.lines_1[5] == 0.0);
+  CHECK(fine.lines_1.back() == 0.025);
+  CHECK(fine.lines_2 == whole.lines_2);
+  CHECK(middle(fine, 0, 0).x_m == Approx(-0.09));
+  CHECK(middle(fine, 0, 0).y_m == Approx(0.005));
+}

@@ -11,8 +11,8 @@ build_packages=(
   libeigen3-dev libsundials-dev libsuitesparse-dev
   libcli11-dev libtomlplusplus-dev nlohmann-json3-dev libfmt-dev libssl-dev
 )
-# What only the tests use: the test framework, and the independent tools they check against.
-test_packages=(catch2 libxml2-utils python3 python3-scipy)
+# What only the tests use: the test framework, and a reader of XML to check files with.
+test_packages=(catch2 libxml2-utils)
 
 say() { printf '%s\n' "-- $*" >&2; }
 

@@ -65,7 +65,26 @@ using SteelLawPtr = std::shared_ptr<const SteelLaw>;
 
 /// sigma(eps) of EN 1992-1-2 3.2.2.1: eps is the stress-related strain, compression positive.
 [[nodiscard]] StressAndTangent concrete_stress(const HotConcrete& concrete, double eps);
-/// sigma(eps) of EN 1993-1-2 3.2.2 / EN 1992-1-2 3.2.3; odd in eps.
+/// sigma(eps) of EN 1993-1-2 3.2.2 / EN 1992-1-2 3.2.3; odd in eps. The constants of the ellipse
+/// are computed once, for the many strains that a fibre sees at one temperature.
+class SteelCurve {
+ public:
+  explicit SteelCurve(const HotSteel& steel);
+  [[nodiscard]] StressAndTangent at(double eps) const;
+
+ private:
+  [[nodiscard]] StressAndTangent in_tension(double eps) const;
+
+  double f_y_Pa_ = 0;
+  double E_Pa_ = 0;
+  double eps_p_ = 0;
+  double ellipse_end_ = 0;      ///< where the plateau starts: eps_y, or eps_p where f_p = f_y
+  double ellipse_base_Pa_ = 0;  ///< f_p - c
+  double b_over_a_ = 0;
+  double radicand_at_p_ = 0;
+};
+
+/// One strain of a steel curve.
 [[nodiscard]] StressAndTangent steel_stress(const HotSteel& steel, double eps);
 
 /// A note when the strength lies within 5 MPa of 50 MPa, where the published law steps.

@@ -172,6 +172,21 @@ bool is_concentric(const Load& load) {
                             : load.eccentricity_x_m == 0.0 && load.eccentricity_y_m == 0.0;
 }
 
+/// In a section that is symmetric both ways an imperfection against the eccentricity only lessens
+/// the moment of the one along it.
+bool relieves_the_load(const MemberLoading& loading) {
+  return loading.eccentricity_u_m < -1e-12 || loading.moment_u_Nm < -1e-9;
+}
+
+bool is_doubly_symmetric(const Column& column, const thermal::OrthogonalGrid& grid,
+                         const std::vector<Direction>& directions,
+                         const std::vector<HotMaterials>& times) {
+  return std::all_of(directions.begin(), directions.end(), [&](const Direction& d) {
+    const FibreLayout layout = fibre_layout(column.section, grid, d);
+    return symmetric_about_v(SectionMoments(layout, times));
+  });
+}
+
 std::vector<HotMaterials> sample_times(const SectionMaterials& materials) {
   const double end_s = materials.history().end_s();
   std::vector<HotMaterials> times;
@@ -185,14 +200,14 @@ MemberSetup member_setup(const Column& column, const SectionMaterials& materials
   const std::vector<HotMaterials> times = sample_times(materials);
   const thermal::OrthogonalGrid& grid = materials.history().grid();
   MemberSetup setup;
-  bool doubly_symmetric = true;
-  for (const Direction& direction : candidate_directions(column)) {
+  const std::vector<Direction> directions = candidate_directions(column);
+  const bool doubly_symmetric = is_doubly_symmetric(column, grid, directions, times);
+  for (const Direction& direction : directions) {
     BendingCase bending{direction, fibre_layout(column.section, grid, direction),
                         loading_in(column, direction)};
     const SectionMoments moments(bending.layout, times);
-    const bool symmetric = symmetric_about_u(moments);
-    doubly_symmetric = doubly_symmetric && symmetric_about_v(moments);
-    bending.loading.biaxial = !symmetric || bends_sideways(bending.loading);
+    if (doubly_symmetric && relieves_the_load(bending.loading)) continue;
+    bending.loading.biaxial = !symmetric_about_u(moments) || bends_sideways(bending.loading);
     if (!bending.loading.biaxial) bending.layout = merged_in_v(bending.layout);
     const bool known =
         std::any_of(setup.cases.begin(), setup.cases.end(),

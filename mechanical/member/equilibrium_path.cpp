@@ -14,6 +14,7 @@ constexpr int kNewtonLimit = 20;
 constexpr int kHalvingLimit = 4;
 constexpr double kFirstStep = 0.1;
 constexpr double kLargestStep = 0.5;  // 0.05 % strain: far below the distance between two peaks
+constexpr double kStartForce = 1e-3;  // of the plastic resistance
 constexpr double kCornerStep = 1e-3;
 constexpr double kCornerReach = 0.2;
 constexpr double kSmallestStep = 1e-7;
@@ -66,8 +67,15 @@ std::optional<PathPoint> EquilibriumPath::project(const Eigen::VectorXd& guess,
 
 std::optional<PathPoint> EquilibriumPath::start(double eps0) const {
   const Eigen::VectorXd guess = model_.uniform_state(eps0);
-  const Eigen::VectorXd forward = model_.uniform_state(1.0).normalized();
-  return project(guess, forward);
+  if (std::optional<PathPoint> point = project(guess, model_.uniform_state(1.0).normalized())) {
+    return point;
+  }
+  // Far out of the middle the mean strain is tensile from the first load on: give the force
+  // instead.
+  const Eigen::Index force = model_.equations();
+  Eigen::VectorXd loaded = guess;
+  loaded(force) = kStartForce;
+  return project(loaded, Eigen::VectorXd::Unit(force + 1, force));
 }
 
 PathPoint EquilibriumPath::advance(const PathPoint& from, double& step) const {

@@ -9,7 +9,7 @@ namespace ringward::mechanical {
 namespace {
 
 /// Above this utilisation the capacity is sampled at every search time.
-constexpr double kCloseToLimit = 0.7;
+constexpr double kCloseToLimit = 0.85;
 
 /// One case on its way through the fire.
 class CaseFollower {

@@ -30,6 +30,12 @@ class HistoryRating {
         in_time_(materials_),
         setup_(member_setup(column, materials_)) {}
 
+  /// Only the case that governed on another grid: directions keep their order.
+  SingleRating rate_case(std::size_t index) {
+    MemberSetup one{setup_.shape, {setup_.cases.at(index)}};
+    return rate_single(column_, column_.confinement, one, in_time_);
+  }
+
   SingleRating rate(ConfinementModel model) {
     return rate_single(column_, model, setup_, in_time_);
   }
@@ -49,7 +55,7 @@ double numerical_uncertainty_s(const Column& column, const thermal::FireExposure
                                thermal::Accuracy accuracy, const SingleRating& chosen) {
   const thermal::TemperatureHistory coarser =
       solve_heat_flow(column.section, fire, {.accuracy = accuracy, .scale = kCoarserScale});
-  const SingleRating again = HistoryRating(column, coarser).rate(column.confinement);
+  const SingleRating again = HistoryRating(column, coarser).rate_case(chosen.governing_case);
   const double difference_s = std::abs(resistance_or(chosen.fire_resistance_s, fire.duration_s) -
                                        resistance_or(again.fire_resistance_s, fire.duration_s));
   return kErrorPerDifference * difference_s + kTimeResolution_s;

@@ -1,5 +1,6 @@
 #pragma once
 
+#include <cstddef>
 #include <optional>
 #include <string>
 #include <vector>
@@ -43,6 +44,7 @@ struct SingleRating {
   std::vector<HistoryRow> history;
   std::vector<TubeEvent> events;
   double cold_capacity_N = 0;
+  std::size_t governing_case = 0;  ///< index of the bending case that falls first
   double reserve_N = 0;  ///< at the fall: largest force over all strains, never the rating
 };
 

@@ -121,6 +121,7 @@ SingleRating rate_single(const Column& column, ConfinementModel model, const Mem
   const CaseHistory& worst = cases[governing];
   SingleRating rating;
   rating.fire_resistance_s = worst.fall_s;
+  rating.governing_case = governing;
   rating.criterion = criterion_of(worst, column);
   rating.events = worst.events;
   rating.reserve_N = worst.reserve_N;

@@ -66,8 +66,12 @@ class HotSection {
     double u, v, area, f_c, eps_c1, drop, eps_th, lateral_f;
   };
   struct Steel {
-    double u, v, area;
-    HotSteel law;
+    double u, v, area, eps_th;
+    SteelCurve curve;
+  };
+  /// The same concrete as columns, for the loop that the processor takes two fibres at a time.
+  struct Columns {
+    Eigen::ArrayXd u, v, eps_th, force, peak_per_eps, slope, eps_cu;
   };
   struct Lateral {
     double mean = 0;    ///< area mean of the lateral strain
@@ -85,6 +89,7 @@ class HotSection {
 
   void add_concrete(const StrainPlane& plane, double p_Pa, SectionResponse& sum,
                     Eigen::Vector3d& per_Pa) const;
+  void fill_columns();
   void add_unconfined(const StrainPlane& plane, SectionResponse& sum) const;
   void add_steel(const StrainPlane& plane, SectionResponse& sum) const;
   [[nodiscard]] Lateral lateral_strain(const StrainPlane& plane, double p_Pa) const;
@@ -92,7 +97,10 @@ class HotSection {
   double solve_pressure(const StrainPlane& plane, Eigen::Vector3d& slope) const;
 
   std::vector<Concrete> concrete_;
+  Columns columns_;
+  bool bends_in_u_only_ = true;
   std::vector<Steel> steel_;
+  SteelCurve hoop_;
   TubeGrip grip_;
   double extent_m_ = 0;
   double area_m2_ = 0;

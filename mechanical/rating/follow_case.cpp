@@ -112,7 +112,7 @@ class CaseFollower {
   bool pass_event(StandingColumn& tried) {
     const bool contact_before = in_contact(standing_);
     if (closes_gap(tried)) {
-      history_.events.push_back({TubeEventKind::end_gap_closed, tried.time_s()});
+      history_.events.push_back({TubeEventKind::end_gap_closed, standing_.time_s()});
       add_sample();
       const Standing after = tried.close_gap(*in_time_.at(tried.time_s()));
       if (after == Standing::lost) throw lost_at(tried.time_s());
@@ -125,7 +125,7 @@ class CaseFollower {
     if (in_contact(tried) != contact_before) {
       history_.events.push_back(
           {contact_before ? TubeEventKind::contact_lost : TubeEventKind::contact_regained,
-           tried.time_s()});
+           standing_.time_s()});
       add_sample();
     }
     return true;

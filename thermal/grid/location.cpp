@@ -21,7 +21,8 @@ std::optional<GridPoint> polar_point(const OrthogonalGrid& grid, const Point& p)
   GridPoint at{std::hypot(p.x_m, p.y_m), 0.0};
   if (!settle(at.along_1, grid.faces_1, kHair_m)) return std::nullopt;
   const double start = grid.faces_2.front();
-  if (grid.symmetry == Symmetry::axisymmetric) {
+  // At the centre every angle is the same.
+  if (grid.symmetry == Symmetry::axisymmetric || at.along_1 <= kHair_m) {
     at.along_2 = 0.5 * (start + grid.faces_2.back());
     return at;
   }

@@ -186,6 +186,21 @@ TEST_CASE("a column heated on one side is rated the same from whichever side") {
         Approx(minutes(top.chosen.fire_resistance_s)).margin(0.02));
 }
 
+TEST_CASE("a round column heated on half its arc is rated the same wherever the arc points") {
+  const auto rated = [](double from_deg) {
+    thermal::FireExposure fire = testing::standard_fire(180);
+    fire.exposed.heated_arc =
+        thermal::Arc{units::rad_from_deg(from_deg), units::rad_from_deg(from_deg + 180.0)};
+    Column column = testing::round_column({.bars = 8, .start_deg = from_deg});
+    column.member = {.length_m = 3.0, .buckling_length_m = 3.0, .imperfection_m = 0.0075};
+    column.load.axial_N = 3.2e6;
+    return rate(column, fire, Accuracy::coarse).chosen.fire_resistance_s;
+  };
+  // The same body turned with its bars. The imperfection is tried towards the bars and along x and
+  // y: along 45 deg the last two are directions towards bars again.
+  CHECK(minutes(rated(45.0)) == Approx(minutes(rated(0.0))).margin(0.05));
+}
+
 TEST_CASE("an eccentricity and its mirror image give the same resistance") {
   const auto rated = [](double e_x_m, double e_y_m) {
     Column column = testing::square_concrete_column(0.3);

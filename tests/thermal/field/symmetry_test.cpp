@@ -131,8 +131,8 @@ TEST_CASE("Turning the heated arc of a circle turns the temperatures") {
   fire.exposed.heated_arc = Arc{turn, turn + units::kPi};
   const TemperatureHistory turned = solved(section, fire);
   CHECK(plain.statistics().symmetry == Symmetry::half);
-  for (const Point p :
-       {Point{0.06, 0.05}, Point{0.0, -0.07}, Point{0.0, 0.001}, Point{0.02, 0.09}}) {
+  for (const Point p : {Point{0.06, 0.05}, Point{0.0, -0.07}, Point{0.0, 0.001}, Point{0.0, 0.0},
+                        Point{0.02, 0.09}}) {
     const Point q{std::cos(turn) * p.x_m - std::sin(turn) * p.y_m,
                   std::sin(turn) * p.x_m + std::cos(turn) * p.y_m};
     CHECK(turned.T_C(q, 2700) == Approx(plain.T_C(p, 2700)).margin(kTimeError_K).epsilon(0));

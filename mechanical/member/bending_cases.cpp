@@ -12,6 +12,8 @@ namespace {
 constexpr double kLeastImperfection = 1e-5;  // of the buckling length
 constexpr double kSymmetryTolerance = 1e-5;  // of the sum of absolute contributions
 
+// Mean lever of the thermal strain over the extent above which heating has a side.
+constexpr double kOneSidedHeating = 1e-3;
 // Cold thermal strains are rounding noise: differences count against this strain.
 constexpr double kStrainScale = 1e-3;
 
@@ -134,7 +136,25 @@ void add_ring_directions(std::vector<Direction>& directions, const thermal::Sect
   }
 }
 
-std::vector<Direction> candidate_directions(const Column& column) {
+/// Towards and away from the hotter side, where heating has one: the column bows along it.
+void add_heating_directions(std::vector<Direction>& directions, const FibreLayout& layout,
+                            const HotMaterials& hot) {
+  double x = 0.0, y = 0.0, scale = 0.0;
+  for (const Fibre& fibre : layout.concrete) {
+    const double weight = fibre.area_m2 * hot.concrete[fibre.source].thermal_strain;
+    x += weight * fibre.u_m;
+    y += weight * fibre.v_m;
+    scale += std::abs(weight) * layout.extent_m;
+  }
+  const double size = std::hypot(x, y);
+  if (size <= kOneSidedHeating * scale) return;
+  directions.push_back({x / size, y / size});
+  directions.push_back({-x / size, -y / size});
+}
+
+std::vector<Direction> candidate_directions(const Column& column,
+                                            const thermal::OrthogonalGrid& grid,
+                                            const std::vector<HotMaterials>& times) {
   std::vector<Direction> directions;
   const Load& load = column.load;
   const double along_x = load.moments_given ? load.moment_x_Nm : load.eccentricity_x_m;
@@ -145,6 +165,8 @@ std::vector<Direction> candidate_directions(const Column& column) {
        {Direction{1, 0}, Direction{-1, 0}, Direction{0, 1}, Direction{0, -1}}) {
     directions.push_back(d);
   }
+  add_heating_directions(directions, fibre_layout(column.section, grid, Direction{1, 0}),
+                         times.back());
   if (column.section.is_circular()) add_ring_directions(directions, column.section);
   return directions;
 }
@@ -200,7 +222,7 @@ MemberSetup member_setup(const Column& column, const SectionMaterials& materials
   const std::vector<HotMaterials> times = sample_times(materials);
   const thermal::OrthogonalGrid& grid = materials.history().grid();
   MemberSetup setup;
-  const std::vector<Direction> directions = candidate_directions(column);
+  const std::vector<Direction> directions = candidate_directions(column, grid, times);
   const bool doubly_symmetric = is_doubly_symmetric(column, grid, directions, times);
   for (const Direction& direction : directions) {
     BendingCase bending{direction, fibre_layout(column.section, grid, direction),

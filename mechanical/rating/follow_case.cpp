@@ -93,6 +93,7 @@ class CaseFollower {
         if (standing == Standing::falls || standing == Standing::jumps) return fall();
         if (eventful && !pass_event(tried)) return false;
         standing_ = std::move(tried);
+        note_regained_grip();
         break;
       }
     }
@@ -129,6 +130,13 @@ class CaseFollower {
       add_sample();
     }
     return true;
+  }
+
+  void note_regained_grip() {
+    const double hoop_Pa = standing_.regained_hoop_Pa();
+    if (hoop_Pa <= standing_.stance().point.hoop_Pa) return;
+    if (!history_.regained) history_.regained = RegainedGrip{standing_.time_s(), 0.0};
+    history_.regained->hoop_Pa = std::max(history_.regained->hoop_Pa, hoop_Pa);
   }
 
   /// The last time at which the column stood is its fire resistance.

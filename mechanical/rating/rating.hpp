@@ -31,6 +31,12 @@ struct HistoryRow {
 
 enum class TubeEventKind { contact_lost, contact_regained, end_gap_closed };
 
+/// Hoop stress that a cooling, shrinking tube regains under the load: reported, never credited.
+struct RegainedGrip {
+  double time_s = 0;
+  double hoop_Pa = 0;  ///< the largest while cooling
+};
+
 /// Something the tube does under the applied load, with its time.
 struct TubeEvent {
   TubeEventKind kind = TubeEventKind::contact_lost;
@@ -43,6 +49,7 @@ struct SingleRating {
   std::string criterion;                    ///< what ends it, e.g. "axial resistance"
   std::vector<HistoryRow> history;
   std::vector<TubeEvent> events;
+  std::optional<RegainedGrip> regained;
   double cold_capacity_N = 0;
   std::size_t governing_case = 0;  ///< index of the bending case that falls first
   double reserve_N = 0;  ///< at the fall: largest force over all strains, never the rating

@@ -53,19 +53,19 @@ void tube_events(NoticeWriter& write, const Column& column, const SingleRating& 
       case TubeEventKind::contact_lost:
         write.caution("contact-lost",
                       fmt::format("Under the applied load the tube loses contact with the core at "
-                                  "{:.1f} min: from then on it does not confine at this load.",
+                                  "{:.2f} min: from then on it does not confine at this load.",
                                   t_min));
         break;
       case TubeEventKind::contact_regained:
         write.note("contact-regained",
                    fmt::format("Under the applied load the dilating core meets the tube again at "
-                               "{:.1f} min.",
+                               "{:.2f} min.",
                                t_min));
         break;
       case TubeEventKind::end_gap_closed:
         write.caution(
             "end-gap-closed",
-            fmt::format("The heated tube closes its end gaps of {:.0f} mm at {:.1f} min: it "
+            fmt::format("The heated tube closes its end gaps of {:.0f} mm at {:.2f} min: it "
                         "then bears on the joint, carries axial force that is not credited "
                         "here, and is no longer counted as confinement.",
                         units::mm_from_m(column.section.tube->end_gap_m), t_min));
@@ -138,7 +138,7 @@ void cold_overload(NoticeWriter& write, const Column& column, const SingleRating
                   units::kN_from_N(column.load.axial_N), units::kN_from_N(chosen.cold_capacity_N)));
 }
 
-void cooling(NoticeWriter& write, const Column& column, const thermal::FireExposure& fire) {
+void cooling(NoticeWriter& write, const SingleRating& chosen, const thermal::FireExposure& fire) {
   if (!fire.gas.has_cooling) return;
   write.caution(
       "cooling-simplified",
@@ -146,10 +146,13 @@ void cooling(NoticeWriter& write, const Column& column, const thermal::FireExpos
       "strength of their highest temperature. Columns have failed while cooling, after the "
       "fire.",
       "en1994-1-2-2005");
-  if (confines(column)) {
-    write.note("re-grip-not-credited",
-               "The grip that a cooling, shrinking tube regains is not credited.");
-  }
+  if (!chosen.regained) return;
+  write.note(
+      "re-grip-not-credited",
+      fmt::format("From {:.2f} min on the cooling, shrinking tube grips the core again, up to a "
+                  "hoop stress of {:.0f} MPa under the load: reported, not credited.",
+                  units::min_from_s(chosen.regained->time_s),
+                  units::MPa_from_Pa(chosen.regained->hoop_Pa)));
 }
 
 void composite_tube(NoticeWriter& write, const Column& column) {
@@ -183,7 +186,7 @@ Notices rating_notices(const Column& column, const thermal::FireExposure& fire,
   yield_model(write, column);
   unordered_bounds(write, rating);
   reserve(write, rating.chosen);
-  cooling(write, column, fire);
+  cooling(write, rating.chosen, fire);
   composite_tube(write, column);
   slip_zone(write, column);
   write.note("transient-creep",

@@ -124,6 +124,7 @@ SingleRating rate_single(const Column& column, ConfinementModel model, const Mem
   rating.governing_case = governing;
   rating.criterion = criterion_of(worst, column);
   rating.events = worst.events;
+  rating.regained = worst.regained;
   rating.reserve_N = worst.reserve_N;
   for (const CapacitySample& sample : least_of(cases, governing)) {
     if (rating.history.empty()) rating.cold_capacity_N = sample.capacity_N;

@@ -25,6 +25,7 @@ struct CaseHistory {
   std::optional<double> fall_s;
   std::vector<CapacitySample> samples;  ///< at the times asked for, then events and the fall
   std::vector<TubeEvent> events;
+  std::optional<RegainedGrip> regained;
   double reserve_N = 0;            ///< largest force over all strains, at the fall
   bool fell_by_stability = false;  ///< the second-order moment ends it, not the section
   bool fell_with_gap = false;      ///< the closing of the end gap ends it

@@ -25,7 +25,8 @@ void StandingColumn::build(const HotMaterials& hot) {
   model_ = std::make_shared<MemberModel>(*section_, fixed_->shape, fixed_->bending.loading,
                                          section_->plastic_N());
   time_s_ = hot.time_s;
-  tube_strain_ = hot.tube_reported_strain;
+  tube_strain_ = hot.tube_strain_now;
+  tube_contraction_ = hot.tube ? hot.tube->thermal_strain - hot.tube_strain_now : 0.0;
 }
 
 Standing StandingColumn::settle(const PathPoint& from) {
@@ -92,6 +93,11 @@ PathPoint StandingColumn::limit() const {
 double StandingColumn::reserve_N() const {
   const EquilibriumPath path(*model_);
   return path.largest_force(stance_.point) * section_->plastic_N();
+}
+
+double StandingColumn::regained_hoop_Pa() const {
+  if (tube_contraction_ <= 0.0) return 0.0;
+  return section_->hoop_after_contraction_Pa(stance_.mid_height, tube_contraction_);
 }
 
 double StandingColumn::force_N(const PathPoint& point) const { return model_->axial_N(point.q); }

@@ -56,6 +56,8 @@ class StandingColumn {
   /// The largest force over all strains ahead of the present equilibrium.
   [[nodiscard]] double reserve_N() const;
   [[nodiscard]] double force_N(const PathPoint& point) const;
+  /// Hoop stress under the load that a cooling tube regains by its contraction; not credited.
+  [[nodiscard]] double regained_hoop_Pa() const;
   [[nodiscard]] const HotSection& section() const { return *section_; }
 
  private:
@@ -68,7 +70,8 @@ class StandingColumn {
   std::shared_ptr<const MemberModel> model_;
   Stance stance_;
   double time_s_ = 0;
-  double tube_strain_ = 0;  ///< thermal strain of the tube now
+  double tube_strain_ = 0;       ///< thermal strain of the tube now
+  double tube_contraction_ = 0;  ///< below its strain at its peak temperature
   bool gap_closed_ = false;
 };
 

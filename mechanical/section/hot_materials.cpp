@@ -60,7 +60,7 @@ void SectionMaterials::fill_tube(HotMaterials& hot, double t_s) const {
   const double T_C = history_.tube_C(t_s);
   const double T_peak_C = std::max(T_C, history_.tube_peak_C(t_s));
   hot.tube = tube_law_->at(T_peak_C, T_peak_C);
-  hot.tube_reported_strain = tube_law_->at(T_C, T_peak_C).thermal_strain;
+  hot.tube_strain_now = tube_law_->at(T_C, T_peak_C).thermal_strain;
 }
 
 HotMaterials SectionMaterials::at(double t_s) const {

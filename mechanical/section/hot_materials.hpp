@@ -14,9 +14,9 @@ namespace ringward::mechanical {
 struct HotMaterials {
   double time_s = 0;
   std::vector<HotConcrete> concrete;
-  std::vector<HotSteel> steel;      ///< zero strength where a point has no steel
-  std::optional<HotSteel> tube;     ///< the hottest strip; strength of its peak temperature
-  double tube_reported_strain = 0;  ///< thermal strain of the tube at its temperature now
+  std::vector<HotSteel> steel;   ///< zero strength where a point has no steel
+  std::optional<HotSteel> tube;  ///< the hottest strip; strength of its peak temperature
+  double tube_strain_now = 0;    ///< thermal strain of the tube at its temperature now
   double bar_max_C = 0;
 };
 

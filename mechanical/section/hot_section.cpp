@@ -235,8 +235,9 @@ SectionResponse HotSection::response(const StrainPlane& plane) const {
   return sum;
 }
 
-double HotSection::reported_hoop_Pa(const StrainPlane& plane, double free_hoop_strain) const {
-  const double strain = lateral_strain(plane, 0.0).mean + free_hoop_strain;
+double HotSection::hoop_after_contraction_Pa(const StrainPlane& plane, double contraction) const {
+  if (grip_.model == ConfinementModel::none) return 0.0;
+  const double strain = lateral_strain(plane, 0.0).mean + grip_.free_hoop_strain + contraction;
   return std::min(grip_.hoop_cap_Pa, hoop_.at(std::max(0.0, strain)).stress_Pa);
 }
 

@@ -51,9 +51,10 @@ class HotSection {
   [[nodiscard]] SectionResponse response(const StrainPlane& plane) const;
   [[nodiscard]] double axial_force_N(double eps0) const { return response({eps0, 0, 0}).N_N; }
 
-  /// Hoop stress under these strains with another free strain (the tube at its temperature now),
-  /// for reports only.
-  [[nodiscard]] double reported_hoop_Pa(const StrainPlane& plane, double free_hoop_strain) const;
+  /// Hoop stress under these strains if the tube were shorter by `contraction` than its grip
+  /// credits (a cooling tube): for reports only.
+  [[nodiscard]] double hoop_after_contraction_Pa(const StrainPlane& plane,
+                                                 double contraction) const;
 
   [[nodiscard]] double plastic_N() const { return plastic_N_; }  ///< sum of area x hot strength
   [[nodiscard]] double extent_m() const { return extent_m_; }

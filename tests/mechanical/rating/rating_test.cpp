@@ -196,9 +196,10 @@ TEST_CASE("a round column heated on half its arc is rated the same wherever the 
     column.load.axial_N = 3.2e6;
     return rate(column, fire, Accuracy::coarse).chosen.fire_resistance_s;
   };
-  // The same body turned with its bars. The imperfection is tried towards the bars and along x and
-  // y: along 45 deg the last two are directions towards bars again.
-  CHECK(minutes(rated(45.0)) == Approx(minutes(rated(0.0))).margin(0.05));
+  // The same body turned with its bars, on a grid turned with its arc: only the search differs. The
+  // worst direction is the axis of the heating, wherever it points.
+  CHECK(minutes(rated(45.0)) == Approx(minutes(rated(0.0))).margin(0.02));
+  CHECK(minutes(rated(20.0)) == Approx(minutes(rated(0.0))).margin(0.02));
 }
 
 TEST_CASE("an eccentricity and its mirror image give the same resistance") {
@@ -241,4 +242,31 @@ TEST_CASE("the stated uncertainty covers the distance to a finer solution") {
     CAPTURE(load_N, error_s, standard.uncertainty_s);
     CHECK(error_s <= standard.uncertainty_s);
   }
+}
+
+TEST_CASE("a column can fall while the fire cools, and the tube's new grip is not credited") {
+  // Reported for such columns under real fires (Liu, Yang & Yang 2018, read as abstract): heat
+  // moves inward after the peak. Peak of this parametric fire at 60 min (EN 1991-1-2 Annex A).
+  const fires::FireCurvePtr curve = fires::parametric_curve({.opening_factor_m05 = 0.06,
+                                                             .fire_load_enclosure_J_m2 = 300e6,
+                                                             .thermal_inertia_J_m2s05K = 1200.0,
+                                                             .growth = fires::GrowthRate::medium});
+  thermal::FireExposure fire;
+  fire.surface.convection_W_m2K = curve->convection_W_m2K();
+  fire.duration_s = units::s_from_min(240);
+  fire.gas = fires::gas_temperature(curve, fire.duration_s);
+  Column column = testing::round_column({.bars = 8, .start_deg = 0.0});
+  column.confinement = ConfinementModel::contact;
+  column.load.axial_N = 3.6e6;
+  const Rating falling = rate(column, fire, Accuracy::standard);
+  CHECK(minutes(falling.chosen.fire_resistance_s) > 60.0);
+  CHECK(has_notice(falling, "cooling-simplified"));
+  column.load.axial_N = 2.0e6;
+  const Rating standing = rate(column, fire, Accuracy::standard);
+  REQUIRE_FALSE(standing.chosen.fire_resistance_s.has_value());
+  REQUIRE(standing.chosen.regained.has_value());
+  CHECK(units::min_from_s(standing.chosen.regained->time_s) > 60.0);
+  CHECK(standing.chosen.regained->hoop_Pa > 1e6);
+  // Not credited: the pressure under the load stays zero to the end.
+  CHECK(standing.chosen.history.back().load_pressure_Pa == 0.0);
 }

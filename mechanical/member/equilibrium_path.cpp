@@ -15,6 +15,7 @@ constexpr int kHalvingLimit = 4;
 constexpr double kFirstStep = 0.1;
 constexpr double kLargestStep = 0.5;  // 0.05 % strain: far below the distance between two peaks
 constexpr double kStartForce = 1e-3;  // of the plastic resistance
+constexpr double kLeastStartForce = 1e-7;
 constexpr double kCornerStep = 1e-3;
 constexpr double kCornerReach = 0.2;
 constexpr double kSmallestStep = 1e-7;
@@ -71,11 +72,15 @@ std::optional<PathPoint> EquilibriumPath::start(double eps0) const {
     return point;
   }
   // Far out of the middle the mean strain is tensile from the first load on: give the force
-  // instead.
+  // instead, a smaller one the larger the lever arm is.
   const Eigen::Index force = model_.equations();
-  Eigen::VectorXd loaded = guess;
-  loaded(force) = kStartForce;
-  return project(loaded, Eigen::VectorXd::Unit(force + 1, force));
+  for (double small = kStartForce; small > kLeastStartForce; small *= 0.2) {
+    Eigen::VectorXd loaded = guess * (small / kStartForce);
+    loaded(force) = small;
+    std::optional<PathPoint> point = project(loaded, Eigen::VectorXd::Unit(force + 1, force));
+    if (point) return point;
+  }
+  return std::nullopt;
 }
 
 PathPoint EquilibriumPath::advance(const PathPoint& from, double& step) const {
@@ -132,7 +137,7 @@ EquilibriumPath::Walk EquilibriumPath::walk_to_force(const PathPoint& from, doub
   for (int count = 0; count < kWalkLimit; ++count) {
     const double gap = scaled_N - current.scaled_N();
     if (std::abs(gap) < kForceTolerance) return {End::at_force, current};
-    if (sign > 0.0 && current.N_slope() <= 0.0) return {End::at_maximum, current};
+    if (sign > 0.0 && current.N_slope() <= 0.0) return {End::at_limit, current};
     const double to_target = current.N_slope() > 0.0 ? std::abs(gap / current.N_slope()) : step;
     if (current.N_slope() > 0.0 && to_target <= 2.0 * step) {
       const std::optional<PathPoint> there = at_force(current, scaled_N);
@@ -146,10 +151,12 @@ EquilibriumPath::Walk EquilibriumPath::walk_to_force(const PathPoint& from, doub
     const bool passed = sign * (scaled_N - next.scaled_N()) < 0.0;
     if (sign > 0.0 && !passed && next.N_slope() <= 0.0) {
       PathPoint top = refine_maximum(current, signed_step);
-      if (top.scaled_N() < scaled_N) return {End::at_maximum, top};
+      if (top.scaled_N() < scaled_N) return {End::at_limit, top};
       step = 0.5 * std::abs(signed_step);
       continue;
     }
+    const bool turns_up = sign < 0.0 && current.N_slope() > 0.0 && next.N_slope() <= 0.0;
+    if (!passed && turns_up) return {End::at_limit, next};
     if (passed) {
       // Close in from the near side: the step over the target was too long for Newton at the force.
       step = 0.5 * std::abs(signed_step);

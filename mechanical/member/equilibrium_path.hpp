@@ -32,13 +32,14 @@ class EquilibriumPath {
   [[nodiscard]] std::optional<PathPoint> start(double eps0) const;
 
   /// What a walk along the path ended at.
-  enum class End { at_force, at_maximum };
+  enum class End { at_force, at_limit };
   struct Walk {
     End end = End::at_force;
     PathPoint point;
   };
   /// From `from` to the force N, the way the column would move: forward while the resistance is
-  /// below N, backward while it is above. Ends at the first maximum below N if that comes first.
+  /// below N, backward while it is above. Ends at the limit that comes first: a maximum below N, or,
+  /// going back, a minimum above N (constant end moments need some axial force).
   /// @throws Error(solver_breakdown) when the path cannot be followed
   [[nodiscard]] Walk walk_to_force(const PathPoint& from, double scaled_N) const;
 

@@ -9,7 +9,7 @@ namespace ringward::mechanical {
 namespace {
 
 /// Shares of the applied load under which a column that has fallen is followed instead.
-constexpr std::array<double, 5> kLighterLoads{1.0, 0.5, 0.1, 0.01, 0.001};
+constexpr std::array<double, 7> kLighterLoads{1.0, 0.75, 0.5, 0.25, 0.1, 0.01, 0.001};
 
 /// Largest value of a function that may have several maxima: sampled closely, then refined around
 /// the best sample by golden section.

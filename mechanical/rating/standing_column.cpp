@@ -52,10 +52,12 @@ Standing StandingColumn::load_cold(const HotMaterials& cold) {
   const double target = loading_up.scaled_N(fixed_->load_N);
   const EquilibriumPath::Walk walk = path.walk_to_force(*start, target);
   stance_.point = walk.point;
-  if (walk.end == EquilibriumPath::End::at_maximum) return Standing::falls;
+  if (walk.end == EquilibriumPath::End::at_limit) return Standing::falls;
   const EquilibriumPath constant_moment(*model_);
-  const std::optional<PathPoint> there = constant_moment.project(walk.point.q, walk.point.tangent);
+  std::optional<PathPoint> there = constant_moment.project(walk.point.q, walk.point.tangent);
   if (!there) return Standing::lost;
+  // Under constant moments more force can mean less curvature: forward is where the force grows.
+  if (there->N_slope() < 0.0) there->tangent = -there->tangent;
   return settle(*there);
 }
 

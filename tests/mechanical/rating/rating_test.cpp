@@ -132,6 +132,29 @@ TEST_CASE("a load above the cold capacity is a resistance of zero, with its noti
   CHECK(rating.chosen.history.size() == 1);
 }
 
+TEST_CASE("end moments beyond what the hot section can bear leave no capacity, and no error") {
+  Column column = testing::round_column({.bars = 8});
+  column.load.moments_given = true;
+  column.load.moment_x_Nm = 150e3;
+  const auto history = thermal::solve_heat_flow(column.section, testing::standard_fire(180), {});
+  const std::vector<CapacityState> states = capacities(column, history, {0.0, 1800.0, 10800.0});
+  CHECK(states[0].capacity_N > states[1].capacity_N);
+  CHECK(states[1].capacity_N > column.load.axial_N);
+  CHECK(states[2].capacity_N == 0.0);
+}
+
+TEST_CASE("a column loaded far out of its middle is followed from its first load on") {
+  // Half the width out, a tenth of a percent of the section in bars: the mean strain is tensile
+  // from the start.
+  Column column = testing::square_concrete_column(0.4);
+  column.member = {.length_m = 3.46, .buckling_length_m = 3.46, .imperfection_m = 0.00865};
+  column.load.eccentricity_x_m = 0.2;
+  column.load.axial_N = 1e5;
+  const Rating rating = rate(column, testing::standard_fire(120), Accuracy::coarse);
+  CHECK(rating.chosen.cold_capacity_N > 1e5);
+  CHECK(rating.chosen.fire_resistance_s.value_or(7200.0) > 600.0);
+}
+
 TEST_CASE("a lightly loaded column survives the followed fire") {
   const Rating rating = rate(stub(3e5), testing::standard_fire(60), Accuracy::coarse);
   CHECK_FALSE(rating.chosen.fire_resistance_s.has_value());

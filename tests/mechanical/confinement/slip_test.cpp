@@ -12,7 +12,8 @@ struct SlipRow {
   double xi, hoop, axial;
 };
 
-/// ds_v/dxi = 2 s_h with s_h from the yield circle, by the classical Runge-Kutta rule: no closed form.
+/// ds_v/dxi = 2 s_h with s_h from the yield circle, by the classical Runge-Kutta rule: no closed
+/// form.
 double axial_by_integration(double xi_end, int steps) {
   const auto hoop = [](double v) { return 0.5 * (-v + std::sqrt(4.0 - 3.0 * v * v)); };
   const double h = xi_end / steps;

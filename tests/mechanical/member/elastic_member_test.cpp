@@ -85,11 +85,12 @@ TEST_CASE("constant end moments and proportional eccentricities agree at one loa
 
 TEST_CASE("a biaxial column bends in the plane of its oblique eccentricity") {
   Sandwich sandwich;
-  sandwich.layout.steel = {{0.1, 0.0, 1e-3, 0}, {-0.1, 0.0, 1e-3, 0}, {0.0, 0.1, 1e-3, 0},
-                           {0.0, -0.1, 1e-3, 0}};
+  sandwich.layout.steel = {
+      {0.1, 0.0, 1e-3, 0}, {-0.1, 0.0, 1e-3, 0}, {0.0, 0.1, 1e-3, 0}, {0.0, -0.1, 1e-3, 0}};
   const HotSection section = sandwich.section();
   const DeflectedShape shape = integrated_shape(kLength_m, 8);
-  const MemberLoading oblique{.eccentricity_u_m = 0.012, .eccentricity_v_m = 0.016, .biaxial = true};
+  const MemberLoading oblique{
+      .eccentricity_u_m = 0.012, .eccentricity_v_m = 0.016, .biaxial = true};
   const MemberModel biaxial(section, shape, oblique, 1e6);
   const MemberModel uniaxial(section, shape, {.eccentricity_u_m = 0.02}, 1e6);
   const StrainPlane two = biaxial.plane(loaded(biaxial, 5e5).q, 0);
@@ -101,7 +102,8 @@ TEST_CASE("a biaxial column bends in the plane of its oblique eccentricity") {
 
 TEST_CASE("the limit load of an elastic-plastic sandwich column is its first-yield load") {
   // Flange force N/2 + N a / ((1 - N/N_cr) 2 arm) reaches A f_y: a quadratic in N (Perry-Robertson
-  // form). After first yield of one flange the tangent stiffness in bending vanishes: a limit point.
+  // form). After first yield of one flange the tangent stiffness in bending vanishes: a limit
+  // point.
   const double yield_Pa = 355e6;
   const Sandwich sandwich(yield_Pa);
   const HotSection section = sandwich.section();

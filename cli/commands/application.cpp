@@ -46,8 +46,8 @@ ExitCode run_chosen(const std::vector<Command>& commands) {
 }
 
 std::vector<Command> add_commands(CLI::App& root) {
-  return {add_rate(root), add_field(root),   add_capacity(root),
-          add_gas(root),  add_explain(root), add_new(root)};
+  return {add_rate(root),     add_field(root),   add_capacity(root), add_gas(root),
+          add_evidence(root), add_explain(root), add_new(root)};
 }
 
 ExitCode parse_and_run(CLI::App& root, int argc, char** argv) {

@@ -8,6 +8,8 @@
 namespace ringward::mechanical {
 namespace {
 
+/// The solver has broken down only when even this step of time loses the equilibrium.
+constexpr double kShortestStep_s = 1e-4;
 /// Above this utilisation the capacity is sampled at every search time.
 constexpr double kCloseToLimit = 0.85;
 
@@ -85,7 +87,9 @@ class CaseFollower {
         const double to_s = step == t_s - standing_.time_s() ? t_s : standing_.time_s() + step;
         const Standing standing = move(tried, to_s);
         const bool eventful = is_eventful(standing, tried);
-        if (eventful && step > kTimeResolution_s) {
+        // Near a limit Newton needs shorter steps than the answer does.
+        const double shortest_s = standing == Standing::lost ? kShortestStep_s : kTimeResolution_s;
+        if (eventful && step > shortest_s) {
           step *= 0.5;
           continue;
         }

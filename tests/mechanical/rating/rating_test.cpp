@@ -137,10 +137,13 @@ TEST_CASE("end moments beyond what the hot section can bear leave no capacity, a
   column.load.moments_given = true;
   column.load.moment_x_Nm = 150e3;
   const auto history = thermal::solve_heat_flow(column.section, testing::standard_fire(180), {});
-  const std::vector<CapacityState> states = capacities(column, history, {0.0, 1800.0, 10800.0});
-  CHECK(states[0].capacity_N > states[1].capacity_N);
-  CHECK(states[1].capacity_N > column.load.axial_N);
-  CHECK(states[2].capacity_N == 0.0);
+  for (const ConfinementModel model : {ConfinementModel::none, ConfinementModel::contact}) {
+    column.confinement = model;
+    const std::vector<CapacityState> states = capacities(column, history, {0.0, 1800.0, 10800.0});
+    CHECK(states[0].capacity_N > states[1].capacity_N);
+    CHECK(states[1].capacity_N > column.load.axial_N);
+    CHECK(states[2].capacity_N == 0.0);
+  }
 }
 
 TEST_CASE("a column loaded far out of its middle is followed from its first load on") {

@@ -1,12 +1,14 @@
 #include "cli/commands/application.hpp"
 
 #include <CLI/CLI.hpp>
+#include <optional>
 #include <string>
 #include <vector>
 
 #include "cli/commands/command.hpp"
 #include "cli/commands/usage_error.hpp"
 #include "cli/exit_code.hpp"
+#include "cli/input/key_suggestion.hpp"
 #include "cli/terminal.hpp"
 #include "thermal/base/error.hpp"
 
@@ -50,6 +52,13 @@ std::vector<Command> add_commands(CLI::App& root) {
           add_evidence(root), add_explain(root), add_new(root)};
 }
 
+std::string unknown_command(const CLI::App& root, const std::string& word) {
+  std::vector<std::string> names;
+  for (const CLI::App* command : root.get_subcommands({})) names.push_back(command->get_name());
+  const std::optional<std::string> meant = nearest(word, names);
+  return "\"" + word + "\" is no command" + (meant ? "; did you mean \"" + *meant + "\"?" : "");
+}
+
 ExitCode parse_and_run(CLI::App& root, int argc, char** argv) {
   const std::vector<Command> commands = add_commands(root);
   try {
@@ -61,6 +70,9 @@ ExitCode parse_and_run(CLI::App& root, int argc, char** argv) {
     write_stdout("ringward " RINGWARD_VERSION "\n");
     return ExitCode::ok;
   } catch (const CLI::ParseError& problem) {
+    if (chosen_command(root).empty() && argc > 1 && argv[1][0] != '-') {
+      return wrong_usage(unknown_command(root, argv[1]), "");
+    }
     return wrong_usage(problem.what(), chosen_command(root));
   }
   try {

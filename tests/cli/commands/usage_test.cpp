@@ -99,6 +99,12 @@ TEST_CASE("Wrong usage exits with 2, says so on standard error and prints no res
   CHECK(folder.names() == std::vector<std::string>{"column.toml"});
 }
 
+TEST_CASE("A mistyped command is answered with the nearest one", "[cli]") {
+  const ProcessResult result = run_ringward({"rat"});
+  CHECK(result.exit_code == 2);
+  CHECK(contains(result.err, "did you mean \"rate\"?"));
+}
+
 TEST_CASE("An unreadable or invalid column exits with 3 and names the place", "[cli]") {
   const TemporaryFolder folder;
   const std::string column = folder / "column.toml";

@@ -11,8 +11,9 @@ build_packages=(
   libeigen3-dev libsundials-dev libsuitesparse-dev
   libcli11-dev libtomlplusplus-dev nlohmann-json3-dev libfmt-dev libssl-dev
 )
-# What only the tests use: the test framework, and a reader of XML to check files with.
-test_packages=(catch2 libxml2-utils)
+# What only the tests use: the test framework, a reader of XML to check files with, and a numerical
+# library for an independent solution.
+test_packages=(catch2 libxml2-utils python3-scipy)
 
 say() { printf '%s\n' "-- $*" >&2; }
 

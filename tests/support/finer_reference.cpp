@@ -15,8 +15,9 @@ FinerReference finer_reference(const Column& column, const thermal::FireExposure
       solve_heat_flow(column.section, fire, {.accuracy = thermal::Accuracy::fine});
   const SectionMaterials materials(column, history);
   MaterialsInTime in_time(materials);
-  const SingleRating fine =
-      rate_single(column, column.confinement, member_setup(column, materials), in_time);
+  const MemberSetup all = member_setup(column, materials);
+  const MemberSetup one{all.shape, {all.cases.at(standard.chosen.governing_case)}};
+  const SingleRating fine = rate_single(column, column.confinement, one, in_time);
   FinerReference reference;
   reference.fire_resistance_s = fine.fire_resistance_s.value_or(fire.duration_s);
   const double R_s = standard.chosen.fire_resistance_s.value_or(fire.duration_s);

@@ -4,7 +4,7 @@
 
 namespace ringward::testing {
 
-/// A rating on the fine grid, with all directions tried, for comparison.
+/// A rating on the fine grid for comparison, in the direction that governs on the standard one.
 struct FinerReference {
   double fire_resistance_s = 0;  ///< the followed time when it stands
   /// Of a result of standard accuracy. Cells and time tolerance of "fine" are 0.45 and 0.4 of

@@ -5,15 +5,13 @@
 #include <algorithm>
 #include <cmath>
 
+#include "mechanical/confinement/slip.hpp"
 #include "thermal/base/units.hpp"
 
 namespace ringward::cli {
 namespace {
 
 using namespace units;
-
-// Slip length over D/mu for a dilation ratio of 1 (docs/theory.md, slip of the tube).
-constexpr double kSlipLengthShare = 0.364;
 
 class NoticeWriter {
  public:
@@ -84,25 +82,19 @@ class NoticeWriter {
   }
 
   void slip_length(const thermal::Tube& tube) {
-    const double slip_m = kSlipLengthShare * input_.column.section.core_width_m() / tube.friction;
+    const mechanical::TubeProfile profile = mechanical::tube_profile(
+        tube.friction, input_.column.section.core_width_m(), tube.clear_height_m);
     const double half_m = tube.clear_height_m / 2;
-    const std::string lengths = fmt::format(
-        "The tube slips over {:.0f} mm from each cut end (0.364 D/mu), half its height "
-        "is {:.0f} mm: ",
-        mm_from_m(slip_m), mm_from_m(half_m));
-    if (slip_m < half_m) {
-      add("slip-length", Severity::note,
-          lengths +
-              "at mid-height the tube also carries axial stress by friction, and its hoop "
-              "stress is limited to 0.577 of yield.",
-          "common practice, no source");
-    } else {
-      add("slip-length", Severity::note,
-          lengths +
-              "the tube slips over its whole height and does not reach the plateau of "
-              "hoop stress.",
-          "common practice, no source");
-    }
+    const bool reaches_plateau = profile.slip_length_m < half_m;
+    add("slip-length", Severity::note,
+        fmt::format("Friction feeds axial stress into the tube over {:.0f} mm from each cut end "
+                    "(0.364 D/mu, at most half its height, {:.0f} mm{}). It leaves {:.3f} of yield "
+                    "as hoop stress at mid-height, the value used, and {:.3f} on average over the "
+                    "height, which is not used.",
+                    mm_from_m(profile.slip_length_m), mm_from_m(half_m),
+                    reaches_plateau ? "" : ": it slips over its whole height",
+                    profile.mid_height_hoop, profile.mean_hoop),
+        "common practice, no source");
   }
 
   void steel_grade(const std::string& part, double yield_Pa) {

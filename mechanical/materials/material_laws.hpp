@@ -3,7 +3,6 @@
 #include <memory>
 #include <string>
 
-#include "thermal/base/notice.hpp"
 #include "thermal/section/section.hpp"
 
 namespace ringward::mechanical {
@@ -86,16 +85,5 @@ class SteelCurve {
 
 /// One strain of a steel curve.
 [[nodiscard]] StressAndTangent steel_stress(const HotSteel& steel, double eps);
-
-/// A note when the strength lies within 5 MPa of 50 MPa, where the published law steps.
-/// @param strength_Pa cylinder strength, not divided by gamma
-/// @source en1992-1-2-2004 6.1
-[[nodiscard]] Notices concrete_strength_notices(double strength_Pa);
-/// A note when f_yk leaves 400..600 MPa.
-/// @source en1992-1-1-2004 3.2.2(3)
-[[nodiscard]] Notices bar_yield_notices(double yield_Pa);
-/// A note when f_y leaves the grades S235..S460.
-/// @source en1994-1-2-2005 1.1
-[[nodiscard]] Notices steel_yield_notices(double yield_Pa);
 
 }  // namespace ringward::mechanical

@@ -5,7 +5,6 @@
 #include <algorithm>
 #include <cmath>
 
-#include "mechanical/confinement/slip.hpp"
 #include "thermal/base/units.hpp"
 
 namespace ringward::mechanical {
@@ -39,11 +38,6 @@ bool is_heated_all_round(const thermal::FireExposure& fire) {
     return f == thermal::FaceCondition::heated;
   });
   return all_faces && !fire.exposed.heated_arc && !fire.exposed.built_in_arc;
-}
-
-bool confines(const Column& column) {
-  return column.section.is_circular() && column.section.tube &&
-         column.section.tube->role == thermal::TubeRole::confining;
 }
 
 void tube_events(NoticeWriter& write, const Column& column, const SingleRating& chosen) {
@@ -103,9 +97,10 @@ void uniform_pressure(NoticeWriter& write, const Column& column,
 
 void yield_model(NoticeWriter& write, const Column& column) {
   if (column.confinement != ConfinementModel::yield) return;
-  write.caution("yield-upper-bound",
-                "The model \"yield\" takes the hot yield strength of the tube whatever its strain, "
-                "and ignores the closing of the end gaps: it is an upper bound, not a rating.");
+  write.caution(
+      "yield-upper-bound",
+      "The model \"yield\" takes the hot yield strength of the tube whatever its strain, "
+      "and ignores the closing of the end gaps: an upper bound of its pressure, not a rating.");
 }
 
 void unordered_bounds(NoticeWriter& write, const Rating& rating) {
@@ -163,17 +158,6 @@ void composite_tube(NoticeWriter& write, const Column& column) {
       "local buckling of its wall is not modelled.");
 }
 
-void slip_zone(NoticeWriter& write, const Column& column) {
-  if (!confines(column)) return;
-  const thermal::Tube& tube = *column.section.tube;
-  const TubeProfile profile =
-      tube_profile(tube.friction, column.section.core_width_m(), tube.clear_height_m);
-  write.note("hoop-at-mid-height",
-             fmt::format("Friction leaves {:.3f} of the tube's yield strength as hoop stress at "
-                         "mid-height (used here) and {:.3f} on average over its height (not used).",
-                         profile.mid_height_hoop, profile.mean_hoop));
-}
-
 }  // namespace
 
 Notices rating_notices(const Column& column, const thermal::FireExposure& fire,
@@ -188,7 +172,6 @@ Notices rating_notices(const Column& column, const thermal::FireExposure& fire,
   reserve(write, rating.chosen);
   cooling(write, rating.chosen, fire);
   composite_tube(write, column);
-  slip_zone(write, column);
   write.note("transient-creep",
              "Transient creep of concrete is contained in the stress-strain law for heating, not "
              "modelled by itself.",

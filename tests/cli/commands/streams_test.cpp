@@ -42,7 +42,8 @@ TEST_CASE("A reader that has gone away ends the program with 5 and without a wor
   CHECK(result.err.empty());
 }
 
-TEST_CASE("--quiet leaves the text out, but not the files or JSON on standard output", "[cli]") {
+TEST_CASE("Option --quiet leaves the text out, but not the files or JSON on standard output",
+          "[cli]") {
   const TemporaryFolder folder;
   const ProcessResult to_file =
       run_ringward({"gas", "--curve", "standard", "--quiet", "--json", folder / "gas.json"});
@@ -76,8 +77,8 @@ TEST_CASE("A target that cannot be written exits with 5, names it, and leaves no
 TEST_CASE("A file size limit is a write error, and the old file stays whole", "[cli]") {
   const TemporaryFolder folder;
   write_content(folder / "gas.csv", "old\n");
-  const std::string command = "ulimit -f 1; exec " RINGWARD_BINARY
-                              " gas --curve standard --step 0.01 --csv " +
+  const std::string command = "ulimit -f 1; exec '" RINGWARD_BINARY
+                              "' gas --curve standard --step 0.01 --csv " +
                               (folder / "gas.csv") + " >/dev/null";
   const ProcessResult result = run_program({"bash", "-c", command});
   CHECK(result.exit_code == 5);

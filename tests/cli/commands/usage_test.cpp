@@ -146,7 +146,7 @@ TEST_CASE("A probe outside the section exits with 3", "[cli]") {
   CHECK(contains(result.err, "100.1"));
 }
 
-TEST_CASE("--set overrides a key and - reads standard input", "[cli]") {
+TEST_CASE("Option --set overrides a key and - reads standard input", "[cli]") {
   const ProcessSetup setup{.stdin_text = round_bare_column()};
   const ProcessResult result =
       run_ringward({"gas", "-", "--set", "fire.curve=\"constant\"", "--set", "fire.constant_C=700",

@@ -167,14 +167,3 @@ TEST_CASE("Concrete above 90 MPa, without strength or with a bad factor is refus
   CHECK_THROWS_AS(concrete_en1992(std::nan(""), Aggregate::siliceous, 1.0), Error);
   CHECK_THROWS_AS(concrete_en1992(40e6, Aggregate::siliceous, 0.0), Error);
 }
-
-// The step at 50 MPa of en1992-1-2-2004 6.1 is real: k_c falls from 1 to 0.9 at 100 C.
-TEST_CASE("A strength within 5 MPa of 50 is noted, farther ones are not") {
-  for (const double near_MPa : {45.0, 50.0, 55.0}) {
-    const Notices notices = concrete_strength_notices(near_MPa * 1e6);
-    REQUIRE(notices.size() == 1);
-    CHECK(notices.front().code == "strength-class-step");
-  }
-  CHECK(concrete_strength_notices(44.9e6).empty());
-  CHECK(concrete_strength_notices(55.1e6).empty());
-}

@@ -267,17 +267,3 @@ TEST_CASE("Steel without strength, too strong for the law or with a bad factor i
   CHECK_THROWS_AS(structural_steel_en1993(355e6, 0.0), Error);
   CHECK_THROWS_AS(bars_en1992(-500e6, BarForming::hot_rolled, 1.0), Error);
 }
-
-// Sources: en1992-1-1-2004 3.2.2(3), bars of 400 to 600 MPa; en1994-1-2-2005 1.1, S235 to S460;
-// from memory. The limits themselves are inside.
-TEST_CASE("A yield strength outside the published range is noted") {
-  CHECK(bar_yield_notices(400e6).empty());
-  CHECK(bar_yield_notices(600e6).empty());
-  REQUIRE(bar_yield_notices(650e6).size() == 1);
-  CHECK(bar_yield_notices(650e6).front().code == "bar-yield-range");
-  CHECK_THAT(bar_yield_notices(250e6).front().text, Catch::Contains("250 MPa"));
-  CHECK(steel_yield_notices(235e6).empty());
-  CHECK(steel_yield_notices(460e6).empty());
-  REQUIRE(steel_yield_notices(690e6).size() == 1);
-  CHECK(steel_yield_notices(690e6).front().code == "steel-yield-range");
-}

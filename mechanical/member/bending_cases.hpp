@@ -27,9 +27,10 @@ struct MemberSetup {
 /// Intervals of the half length where the deflection is integrated.
 inline constexpr int kHalfLengthIntervals = 8;
 
-/// Directions: along the load's eccentricity, +-x, +-y, towards and away from the hotter side, and in
-/// a round section towards and between the bars of each ring. A concentric load on a section that is symmetric both ways, temperatures
-/// included, deflects as a half-sine; everything else is integrated along the length.
+/// Directions: along the load's eccentricity, +-x, +-y, towards and away from the hotter side, and
+/// in a round section towards and between the bars of each ring. A concentric load on a section
+/// that is symmetric both ways, temperatures included, deflects as a half-sine; everything else is
+/// integrated along the length.
 [[nodiscard]] MemberSetup member_setup(const Column& column, const SectionMaterials& materials);
 
 }  // namespace ringward::mechanical

@@ -12,18 +12,19 @@ namespace {
 constexpr double kResidualTolerance = 1e-9;  // of the reference force
 constexpr int kNewtonLimit = 20;
 constexpr int kHalvingLimit = 4;
-constexpr double kFirstStep = 0.1;
+constexpr double kFirstStep = 0.1;    // times the length scale of the model, as kLargestStep
 constexpr double kLargestStep = 0.5;  // 0.05 % strain: far below the distance between two peaks
 constexpr double kStartForce = 1e-3;  // of the plastic resistance
 constexpr double kLeastStartForce = 1e-7;
 constexpr double kCornerStep = 1e-3;
 constexpr double kCornerReach = 0.2;
-constexpr double kSmallestStep = 1e-7;
+constexpr double kCornerStretch = 20.0;
+constexpr double kSmallestStep = 1e-6;
 constexpr double kSmallestWidth = 1e-9;
 constexpr double kForceTolerance = 1e-8;
 constexpr double kMaximumTolerance = 1e-7;
 constexpr double kCrushedStrain = 0.06;  // beyond eps_cu1 of any temperature
-constexpr int kWalkLimit = 4000;
+constexpr int kWalkLimit = 1000;
 
 Error path_lost(const char* what) {
   return {ErrorKind::solver_breakdown, std::string("equilibrium path of the member: ") + what};
@@ -83,16 +84,26 @@ std::optional<PathPoint> EquilibriumPath::start(double eps0) const {
   return std::nullopt;
 }
 
-PathPoint EquilibriumPath::advance(const PathPoint& from, double& step) const {
+std::optional<PathPoint> EquilibriumPath::try_advance(const PathPoint& from, double& step) const {
+  bool tried_corner = false;
   while (std::abs(step) > kSmallestStep) {
     const std::optional<PathPoint> next = project(from.q + step * from.tangent, from.tangent);
     // A turn of more than 60 degrees means that Newton found another branch, or a corner.
-    if (next && next->tangent.dot(from.tangent) > 0.5) return *next;
+    if (next && next->tangent.dot(from.tangent) > 0.5) return next;
     if (std::abs(step) < kCornerStep) {
-      if (const std::optional<PathPoint> beyond = turn_corner(from, step)) return *beyond;
+      if (next && (next->q - from.q).norm() < kCornerStretch * std::abs(step)) return next;
+      if (!tried_corner) {
+        if (std::optional<PathPoint> beyond = turn_corner(from, step)) return beyond;
+      }
+      tried_corner = true;
     }
     step *= 0.5;
   }
+  return std::nullopt;
+}
+
+PathPoint EquilibriumPath::advance(const PathPoint& from, double& step) const {
+  if (std::optional<PathPoint> next = try_advance(from, step)) return *next;
   throw path_lost("no neighbouring equilibrium found");
 }
 
@@ -132,7 +143,7 @@ std::optional<PathPoint> EquilibriumPath::at_force(const PathPoint& from, double
 
 EquilibriumPath::Walk EquilibriumPath::walk_to_force(const PathPoint& from, double scaled_N) const {
   PathPoint current = from;
-  double step = kFirstStep;
+  double step = kFirstStep * model_.length_scale();
   const double sign = from.scaled_N() < scaled_N ? 1.0 : -1.0;
   for (int count = 0; count < kWalkLimit; ++count) {
     const double gap = scaled_N - current.scaled_N();
@@ -164,7 +175,7 @@ EquilibriumPath::Walk EquilibriumPath::walk_to_force(const PathPoint& from, doub
       continue;
     }
     current = next;
-    step = std::min(kLargestStep, 1.6 * std::abs(signed_step));
+    step = std::min(kLargestStep * model_.length_scale(), 1.6 * std::abs(signed_step));
   }
   throw path_lost("the applied force is not reached");
 }
@@ -203,24 +214,27 @@ PathPoint EquilibriumPath::refine_maximum(const PathPoint& before, double step) 
 
 PathPoint EquilibriumPath::walk_to_maximum(const PathPoint& from) const {
   PathPoint current = from;
-  double step = kFirstStep;
+  double step = kFirstStep * model_.length_scale();
   for (int count = 0; count < kWalkLimit; ++count) {
     if (current.N_slope() <= 0.0) return current;
-    const PathPoint next = advance(current, step);
-    if (next.N_slope() <= 0.0) return refine_maximum(current, step);
-    if (next.scaled_N() < current.scaled_N()) {  // a maximum and a minimum inside one step
+    const std::optional<PathPoint> next = try_advance(current, step);
+    // Every point passed is an equilibrium: where the path cannot be followed on, as where one
+    // station of the length snaps by itself, the force reached is a lower bound of the maximum.
+    if (!next) return current;
+    if (next->N_slope() <= 0.0) return refine_maximum(current, step);
+    if (next->scaled_N() < current.scaled_N()) {  // a maximum and a minimum inside one step
       step *= 0.5;
       continue;
     }
-    current = next;
-    step = std::min(kLargestStep, 1.6 * step);
+    current = *next;
+    step = std::min(kLargestStep * model_.length_scale(), 1.6 * step);
   }
   throw path_lost("no maximum of the force found");
 }
 
 double EquilibriumPath::largest_force(const PathPoint& from) const {
   PathPoint current = from;
-  double step = kFirstStep;
+  double step = kFirstStep * model_.length_scale();
   double largest = from.scaled_N();
   for (int count = 0; count < kWalkLimit; ++count) {
     const StrainPlane plane = model_.plane(current.q, 0);
@@ -240,7 +254,7 @@ double EquilibriumPath::largest_force(const PathPoint& from) const {
     }
     largest = std::max(largest, next.scaled_N());
     current = next;
-    step = std::min(kLargestStep, 1.6 * tried);
+    step = std::min(kLargestStep * model_.length_scale(), 1.6 * tried);
   }
   return largest;
 }

@@ -38,12 +38,12 @@ class EquilibriumPath {
     PathPoint point;
   };
   /// From `from` to the force N, the way the column would move: forward while the resistance is
-  /// below N, backward while it is above. Ends at the limit that comes first: a maximum below N, or,
-  /// going back, a minimum above N (constant end moments need some axial force).
+  /// below N, backward while it is above. Ends at the limit that comes first: a maximum below N,
+  /// or, going back, a minimum above N (constant end moments need some axial force).
   /// @throws Error(solver_breakdown) when the path cannot be followed
   [[nodiscard]] Walk walk_to_force(const PathPoint& from, double scaled_N) const;
 
-  /// Forward to the first maximum of the force.
+  /// Forward to the first maximum of the force, or to the last equilibrium that can be reached.
   /// @throws Error(solver_breakdown) when the path cannot be followed
   [[nodiscard]] PathPoint walk_to_maximum(const PathPoint& from) const;
 
@@ -55,6 +55,7 @@ class EquilibriumPath {
   [[nodiscard]] PathPoint refine_maximum(const PathPoint& before, double step) const;
   /// One step of at most `step` (negative: backward); shortens it until Newton converges.
   [[nodiscard]] PathPoint advance(const PathPoint& from, double& step) const;
+  [[nodiscard]] std::optional<PathPoint> try_advance(const PathPoint& from, double& step) const;
   [[nodiscard]] std::optional<PathPoint> turn_corner(const PathPoint& from, double step) const;
 
   const MemberModel& model_;

@@ -1,6 +1,7 @@
 #pragma once
 
 #include <Eigen/Core>
+#include <cmath>
 
 #include "mechanical/member/deflection.hpp"
 #include "mechanical/section/hot_section.hpp"
@@ -28,6 +29,11 @@ class MemberModel {
 
   [[nodiscard]] Eigen::Index unknowns() const { return equations() + 1; }
   [[nodiscard]] Eigen::Index equations() const { return shape_.stations() * per_station_; }
+
+  /// Length of a vector of unknowns in which every station moves by one unit.
+  [[nodiscard]] double length_scale() const {
+    return std::sqrt(static_cast<double>(shape_.stations()));
+  }
 
   struct Linearised {
     Eigen::VectorXd residual;  ///< [equations]

@@ -77,7 +77,7 @@ ordered_json numerics_json(const thermal::HeatFlowStatistics& heat_flow) {
 }  // namespace
 
 std::string rate_json(const RateReport& report) {
-  const mechanical::Bounds& bounds = report.rating.bounds;
+  const mechanical::Bounds& bounds = report.rating.bounds.value();
   const ordered_json document{{"schema", "ringward-rate/1"},
                               {"program", {{"name", "ringward"}, {"version", RINGWARD_VERSION}}},
                               {"title", report.input.title},

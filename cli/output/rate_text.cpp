@@ -74,7 +74,7 @@ std::string bound(const RateReport& report, const char* name, ConfinementModel m
 
 std::string band(const RateReport& report) {
   if (!has_confining_tube(report)) return "none: no tube confines this column";
-  const mechanical::Bounds& bounds = report.rating.bounds;
+  const mechanical::Bounds& bounds = report.rating.bounds.value();
   return bound(report, "none", ConfinementModel::none, bounds.none_s) + ", " +
          bound(report, "contact", ConfinementModel::contact, bounds.contact_s) + ", " +
          bound(report, "yield", ConfinementModel::yield, bounds.yield_s) + " min";

@@ -54,42 +54,49 @@ double resistance_or(const std::optional<double>& fire_resistance_s, double foll
   return fire_resistance_s.value_or(followed_s);
 }
 
-double numerical_uncertainty_s(const Column& column, const thermal::FireExposure& fire,
-                               thermal::Accuracy accuracy, const SingleRating& chosen) {
-  const thermal::TemperatureHistory coarser =
-      solve_heat_flow(column.section, fire, {.accuracy = accuracy, .scale = kCoarserScale});
+double numerical_uncertainty_s(const Column& column, const thermal::TemperatureHistory& coarser,
+                               const SingleRating& chosen) {
   const SingleRating again = HistoryRating(column, coarser).rate_case(chosen.governing_case);
-  const double difference_s = std::abs(resistance_or(chosen.fire_resistance_s, fire.duration_s) -
-                                       resistance_or(again.fire_resistance_s, fire.duration_s));
+  const double followed_s = coarser.end_s();
+  const double difference_s = std::abs(resistance_or(chosen.fire_resistance_s, followed_s) -
+                                       resistance_or(again.fire_resistance_s, followed_s));
   return kErrorPerDifference * difference_s + kTimeResolution_s;
 }
 
-Bounds bounds_of(const SingleRating& none, const SingleRating& contact, const SingleRating& yield) {
-  return {none.fire_resistance_s, contact.fire_resistance_s, yield.fire_resistance_s};
+void add_bounds(Rating& rating, const Column& column, HistoryRating& rerate) {
+  const std::optional<double>& chosen_s = rating.chosen.fire_resistance_s;
+  if (!tube_confines(column)) {
+    rating.bounds = Bounds{chosen_s, chosen_s, chosen_s};
+    return;
+  }
+  const auto with = [&](ConfinementModel model) {
+    return model == column.confinement ? rating.chosen : rerate.rate(model);
+  };
+  const SingleRating none = with(ConfinementModel::none);
+  rating.bounds = Bounds{none.fire_resistance_s, with(ConfinementModel::contact).fire_resistance_s,
+                         with(ConfinementModel::yield).fire_resistance_s};
+  rating.cold_confinement_ratio = rating.chosen.cold_capacity_N / none.cold_capacity_N;
 }
 
 }  // namespace
 
-Rating rate(const Column& column, const thermal::FireExposure& fire, thermal::Accuracy accuracy) {
-  const thermal::TemperatureHistory history =
-      solve_heat_flow(column.section, fire, {.accuracy = accuracy});
+Rating rate(const Column& column, const thermal::FireExposure& fire, thermal::Accuracy accuracy,
+            const RatingScope& scope) {
+  const auto heat_flow = [&](const thermal::Resolution& resolution) {
+    return scope.heat_flow ? scope.heat_flow(resolution)
+                           : solve_heat_flow(column.section, fire, resolution);
+  };
+  const thermal::TemperatureHistory history = heat_flow({.accuracy = accuracy});
   HistoryRating rerate(column, history);
   Rating rating;
   rating.chosen = rerate.rate(column.confinement);
   rating.followed_s = history.end_s();
   rating.heat_flow = history.statistics();
-  if (tube_confines(column)) {
-    const auto with = [&](ConfinementModel model) {
-      return model == column.confinement ? rating.chosen : rerate.rate(model);
-    };
-    const SingleRating none = with(ConfinementModel::none);
-    rating.bounds = bounds_of(none, with(ConfinementModel::contact), with(ConfinementModel::yield));
-    rating.cold_confinement_ratio = rating.chosen.cold_capacity_N / none.cold_capacity_N;
-  } else {
-    rating.bounds = bounds_of(rating.chosen, rating.chosen, rating.chosen);
-  }
-  if (resistance_or(rating.chosen.fire_resistance_s, 1.0) > 0.0) {
-    rating.uncertainty_s = numerical_uncertainty_s(column, fire, accuracy, rating.chosen);
+  if (scope.bounds) add_bounds(rating, column, rerate);
+  if (scope.uncertainty && resistance_or(rating.chosen.fire_resistance_s, 1.0) > 0.0) {
+    const thermal::TemperatureHistory coarser =
+        heat_flow({.accuracy = accuracy, .scale = kCoarserScale});
+    rating.uncertainty_s = numerical_uncertainty_s(column, coarser, rating.chosen);
   }
   rating.notices = rating_notices(column, fire, rating);
   rating.notices.insert(rating.notices.end(), history.notices().begin(), history.notices().end());

@@ -1,6 +1,7 @@
 #pragma once
 
 #include <cstddef>
+#include <functional>
 #include <optional>
 #include <string>
 #include <vector>
@@ -65,8 +66,8 @@ struct Bounds {
 struct Rating {
   SingleRating chosen;
   double followed_s = 0;
-  double uncertainty_s = 0;  ///< numerical only: grid and time step
-  Bounds bounds;
+  double uncertainty_s = 0;      ///< numerical only: grid and time step
+  std::optional<Bounds> bounds;  ///< none: not asked for
   std::optional<double>
       cold_confinement_ratio;  ///< confined over unconfined member capacity at 20 C
   thermal::HeatFlowStatistics heat_flow;
@@ -85,10 +86,20 @@ struct CapacityState {
   double lateral_pressure_Pa = 0;  ///< at the member's limit state
 };
 
+/// What of a rating is wanted, and where its temperatures come from.
+struct RatingScope {
+  bool bounds = true;       ///< the answers of the other confinement models
+  bool uncertainty = true;  ///< rates again on a coarser grid; else it is 0, not known
+  /// Temperatures of the column's section in its fire, for columns that share them; may be called
+  /// with the resolution of the rating and, for the uncertainty, with a coarser one. None: solved
+  /// for this rating alone.
+  std::function<thermal::TemperatureHistory(const thermal::Resolution&)> heat_flow = {};
+};
+
 /// Rates the column: follows the equilibrium it stands on through the fire until it vanishes.
 /// @throws Error(solver_breakdown) with the time when an equilibrium cannot be computed
 [[nodiscard]] Rating rate(const Column& column, const thermal::FireExposure& fire,
-                          thermal::Accuracy accuracy);
+                          thermal::Accuracy accuracy, const RatingScope& scope = {});
 
 /// @param times_s increasing, within the history
 [[nodiscard]] std::vector<CapacityState> capacities(const Column& column,

@@ -105,7 +105,7 @@ void yield_model(NoticeWriter& write, const Column& column) {
 
 void unordered_bounds(NoticeWriter& write, const Rating& rating) {
   const auto or_end = [&](const std::optional<double>& s) { return s.value_or(rating.followed_s); };
-  if (or_end(rating.bounds.yield_s) >= or_end(rating.bounds.none_s) - kOneSecond) return;
+  if (or_end(rating.bounds->yield_s) >= or_end(rating.bounds->none_s) - kOneSecond) return;
   write.note(
       "confinement-softens",
       "The model \"yield\" rates this column below \"none\" and is no upper bound here: the law "
@@ -168,7 +168,7 @@ Notices rating_notices(const Column& column, const thermal::FireExposure& fire,
   confinement_worth(write, column, rating);
   uniform_pressure(write, column, fire);
   yield_model(write, column);
-  unordered_bounds(write, rating);
+  if (rating.bounds) unordered_bounds(write, rating);
   reserve(write, rating.chosen);
   cooling(write, rating.chosen, fire);
   composite_tube(write, column);

@@ -64,8 +64,8 @@ TEST_CASE("more confinement never shortens the life of a stocky column that live
     const Rating rating = rate(stub(load_N), testing::standard_fire(120), Accuracy::standard);
     CAPTURE(load_N);
     // Equal within the resolution of the search where the tube has no grip.
-    CHECK(or_end(rating.bounds.none_s) <= or_end(rating.bounds.contact_s) + 0.6);
-    CHECK(or_end(rating.bounds.contact_s) <= or_end(rating.bounds.yield_s) + 0.6);
+    CHECK(or_end(rating.bounds->none_s) <= or_end(rating.bounds->contact_s) + 0.6);
+    CHECK(or_end(rating.bounds->contact_s) <= or_end(rating.bounds->yield_s) + 0.6);
   }
 }
 
@@ -73,7 +73,7 @@ TEST_CASE("a bound that comes out of order is named, never hidden") {
   // After an hour the tube's pressure is small, and the law for confined concrete moves the peaks
   // of hot layers to strains where the core is past its own: "yield" then falls below "none".
   const Rating rating = rate(stub(3.0e6), testing::standard_fire(150), Accuracy::standard);
-  REQUIRE(*rating.bounds.yield_s < *rating.bounds.none_s - 1.0);
+  REQUIRE(*rating.bounds->yield_s < *rating.bounds->none_s - 1.0);
   CHECK(has_notice(rating, "confinement-softens"));
 }
 

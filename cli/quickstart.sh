@@ -5,7 +5,7 @@ set -euo pipefail
 # shellcheck source=cli/setup.sh
 source "$(dirname -- "${BASH_SOURCE[0]}")/setup.sh"
 
-install_packages "${build_packages[@]}"
+install_packages "${build_packages[@]}" "${recommended_packages[@]}"
 configure_tree build -DCMAKE_BUILD_TYPE=Release -DRINGWARD_SANITIZE=OFF -DRINGWARD_TESTS=OFF
 build_tree build ringward
 

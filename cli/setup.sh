@@ -10,7 +10,10 @@ build_packages=(
   build-essential cmake ninja-build
   libeigen3-dev libsundials-dev libsuitesparse-dev
   libcli11-dev libtomlplusplus-dev nlohmann-json3-dev libfmt-dev libssl-dev
+  libtbb-dev libboost-dev libglib2.0-dev pkg-config
 )
+# What the program runs for pictures; without it results are complete but have none.
+recommended_packages=(gnuplot-nox)
 # What only the tests use: the test framework, a reader of XML to check files with, and a numerical
 # library for an independent solution.
 test_packages=(catch2 libxml2-utils python3-scipy)

@@ -21,7 +21,7 @@ if [[ "${1:-}" == --sanitize ]]; then
   export UBSAN_OPTIONS="${UBSAN_OPTIONS:-print_stacktrace=1}"
 fi
 
-install_packages "${build_packages[@]}" "${test_packages[@]}"
+install_packages "${build_packages[@]}" "${recommended_packages[@]}" "${test_packages[@]}"
 configure_tree "$tree" "${options[@]}" -DRINGWARD_TESTS=ON
 build_tree "$tree"
 if "$sanitize"; then

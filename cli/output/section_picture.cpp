@@ -68,16 +68,6 @@ std::string text_at(double x, double y, const std::string& attributes, const std
                      attributes.empty() ? "" : " ", attributes, xml_text(text));
 }
 
-// At most `length` characters of UTF-8, never cut inside one.
-std::string shortened(const std::string& text, std::size_t length) {
-  std::size_t characters = 0;
-  for (std::size_t i = 0; i < text.size(); ++i) {
-    const bool starts_character = (static_cast<unsigned char>(text[i]) & 0xC0) != 0x80;
-    if (starts_character && ++characters > length) return text.substr(0, i) + "...";
-  }
-  return text;
-}
-
 std::string time_list(const std::vector<FieldState>& states) {
   std::string list;
   for (const FieldState& state : states) {

@@ -79,13 +79,6 @@ FireTest tube_test(const PublishedTable& table, std::size_t row) {
   return test;
 }
 
-thermal::FireExposure astm_fire(double duration_min) {
-  thermal::FireExposure fire;
-  fire.duration_s = units::s_from_min(duration_min);
-  fire.gas = fires::gas_temperature(fires::nominal_curve("astm-e119"), fire.duration_s);
-  return fire;
-}
-
 thermal::Tube tube_of(const FireTest& test, const Assumptions& assumptions) {
   thermal::Tube tube;
   tube.thickness_m = test.wall_m;
@@ -197,9 +190,16 @@ mechanical::Column column_of(const FireTest& test, const Assumptions& assumption
   return column;
 }
 
+thermal::FireExposure test_fire(double duration_min) {
+  thermal::FireExposure fire;
+  fire.duration_s = units::s_from_min(duration_min);
+  fire.gas = fires::gas_temperature(fires::nominal_curve("astm-e119"), fire.duration_s);
+  return fire;
+}
+
 std::optional<double> predicted_min(const FireTest& test, const Assumptions& assumptions) {
   const mechanical::Rating rating =
-      rate(column_of(test, assumptions), astm_fire(2.0 * test.measured_min),
+      rate(column_of(test, assumptions), test_fire(2.0 * test.measured_min),
            thermal::Accuracy::standard, {.bounds = false, .uncertainty = false});
   if (!rating.chosen.fire_resistance_s) return std::nullopt;
   return units::min_from_s(*rating.chosen.fire_resistance_s);

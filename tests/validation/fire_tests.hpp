@@ -5,6 +5,7 @@
 #include <vector>
 
 #include "mechanical/column.hpp"
+#include "thermal/boundary/exposure.hpp"
 
 namespace ringward::testing {
 
@@ -58,7 +59,10 @@ struct Assumptions {
 
 [[nodiscard]] mechanical::Column column_of(const FireTest& test, const Assumptions& assumptions);
 
-/// Fire resistance in the ASTM E119 fire by the program. A column that was tested without load is
+/// The ASTM E119 fire of all these tests.
+[[nodiscard]] thermal::FireExposure test_fire(double duration_min);
+
+/// Fire resistance in that fire by the program. A column that was tested without load is
 /// given its own weight.
 /// @return none when it stands for twice the measured time
 [[nodiscard]] std::optional<double> predicted_min(const FireTest& test,

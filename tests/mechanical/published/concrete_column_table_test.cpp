@@ -1,13 +1,13 @@
 // The tabulated reinforced-concrete columns of EN 1992-1-2, method A, from outside.
 
 #include <catch2/catch.hpp>
-#include <cmath>
 #include <sstream>
 
 #include "mechanical/rating/rating.hpp"
 #include "tests/support/bar_positions.hpp"
 #include "tests/support/columns.hpp"
 #include "tests/support/published_table.hpp"
+#include "tests/support/simple_formulas.hpp"
 #include "thermal/base/units.hpp"
 
 using namespace ringward;
@@ -63,15 +63,14 @@ std::string name_of(const Entry& e) {
   return text.str();
 }
 
-/// en1992-1-2-2004 eq. (5.7), from memory: alpha_cc = 1, b' = b for a square. [min]
+/// The rule with alpha_cc = 1, b' = b for a square. [min]
 double equation_5_7_min(const Entry& e, double omega, double l_0fi_m) {
-  constexpr double kAlphaCc = 1.0;
-  const double R_eta = 83.0 * (1.0 - e.mu_fi * (1.0 + omega) / (0.85 / kAlphaCc + omega));
-  const double R_a = 1.60 * (e.axis_mm - 30.0);
-  const double R_l = 9.60 * (5.0 - l_0fi_m);
-  const double R_b = 0.09 * e.width_mm;
-  const double R_n = e.bars > 4 ? 12.0 : 0.0;
-  return 120.0 * std::pow((R_eta + R_a + R_l + R_b + R_n) / 120.0, 1.8);
+  return testing::concrete_rule_min({.mu_fi = e.mu_fi,
+                                     .omega = omega,
+                                     .axis_mm = e.axis_mm,
+                                     .l_0fi_m = l_0fi_m,
+                                     .b_mm = e.width_mm,
+                                     .over_4_bars = e.bars > 4});
 }
 
 // The table states none of these: C30 and S500; omega = A_s f_yd / (A_c f_cd) = 0.5, 2.3 % of
@@ -148,7 +147,7 @@ TEST_CASE("The equation behind the tabulated concrete columns returns their clas
 //
 // One-sided, 0.70 of the class. The table comes from eq. (5.7), a line through the middle of tests
 // of columns whose ends gave some restraint (from memory); fire tests scatter by 30 % about any
-// rule (see column_fire_tests_test.cpp), and the model column is hinged, bent by l/400, and alone.
+// rule (see docs/validation.md), and the model column is hinged, bent by l/400, and alone.
 // Above the class nothing is asked: the table is round numbers.
 constexpr double kLeastOfClass = 0.70;
 

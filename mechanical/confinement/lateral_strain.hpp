@@ -31,6 +31,10 @@ class LateralStrainCurve {
             .slope = c.b + s * (2.0 * c.c + 3.0 * s * c.d)};
   }
 
+  /// y(z) <= kBoundLinear z + kBoundSquare z^2 for every z >= 0 (tested over the whole table).
+  static constexpr double kBoundLinear = 0.2;
+  static constexpr double kBoundSquare = 0.5;
+
   /// phi(y) itself, y >= 0.
   [[nodiscard]] static double phi(double y);
   [[nodiscard]] static double phi_slope(double y);

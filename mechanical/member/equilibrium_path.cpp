@@ -57,7 +57,7 @@ std::optional<PathPoint> EquilibriumPath::project(const Eigen::VectorXd& guess,
     // Fibres that crack or crush bend the residual sharply: shorten what does not improve it.
     double share = 1.0;
     for (int halving = 0;; ++halving) {
-      at = model_.linearise(q + share * change);
+      at = model_.linearise(q + share * change, at.pressure_Pa);
       const bool better = at.residual.lpNorm<Eigen::Infinity>() < norm;
       if (better || halving == kHalvingLimit) break;
       share *= 0.5;

@@ -34,9 +34,9 @@ double MemberModel::lever(const Eigen::VectorXd& q, Eigen::Index station, Eigen:
   return sum * curvature_unit;
 }
 
-void MemberModel::fill_station(const Eigen::VectorXd& q, Eigen::Index station,
-                               Linearised& out) const {
-  const SectionResponse answer = section_.response(plane(q, station));
+double MemberModel::fill_station(const Eigen::VectorXd& q, Eigen::Index station, double likely_Pa,
+                                 Linearised& out) const {
+  const SectionResponse answer = section_.response(plane(q, station), likely_Pa);
   const double N = axial_N(q);
   const double extent = section_.extent_m();
   const Eigen::Index row = station * per_station_;
@@ -74,12 +74,15 @@ void MemberModel::fill_station(const Eigen::VectorXd& q, Eigen::Index station,
     out.pressure_Pa = answer.pressure_Pa;
     out.hoop_Pa = answer.hoop_Pa;
   }
+  return answer.pressure_Pa;
 }
 
-MemberModel::Linearised MemberModel::linearise(const Eigen::VectorXd& q) const {
+MemberModel::Linearised MemberModel::linearise(const Eigen::VectorXd& q, double likely_Pa) const {
   Linearised out{.residual = Eigen::VectorXd::Zero(equations()),
                  .jacobian = Eigen::MatrixXd::Zero(equations(), unknowns())};
-  for (Eigen::Index s = 0; s < shape_.stations(); ++s) fill_station(q, s, out);
+  for (Eigen::Index s = 0; s < shape_.stations(); ++s) {
+    likely_Pa = fill_station(q, s, likely_Pa, out);
+  }
   return out;
 }
 

@@ -41,7 +41,8 @@ class MemberModel {
     double pressure_Pa = 0;    ///< at mid-height
     double hoop_Pa = 0;
   };
-  [[nodiscard]] Linearised linearise(const Eigen::VectorXd& unknowns) const;
+  /// @param likely_Pa pressure at mid-height of a state close by
+  [[nodiscard]] Linearised linearise(const Eigen::VectorXd& unknowns, double likely_Pa = 0.0) const;
 
   [[nodiscard]] double axial_N(const Eigen::VectorXd& q) const {
     return q(equations()) * reference_N_;
@@ -55,7 +56,9 @@ class MemberModel {
  private:
   [[nodiscard]] double lever(const Eigen::VectorXd& q, Eigen::Index station,
                              Eigen::Index part) const;
-  void fill_station(const Eigen::VectorXd& q, Eigen::Index station, Linearised& out) const;
+  /// @return the pressure there
+  double fill_station(const Eigen::VectorXd& q, Eigen::Index station, double likely_Pa,
+                      Linearised& out) const;
 
   const HotSection& section_;
   const DeflectedShape& shape_;

@@ -231,7 +231,8 @@ std::string description(const Column& column, const std::string& fire) {
 }
 
 double coarse_resistance_min(const Column& column, const FireExposure& fire) {
-  const Rating rating = rate(column, fire, Accuracy::coarse);
+  const Rating rating =
+      rate(column, fire, Accuracy::coarse, {.bounds = false, .uncertainty = false});
   return units::min_from_s(rating.chosen.fire_resistance_s.value_or(fire.duration_s));
 }
 

@@ -35,6 +35,28 @@ const std::array<StrainPlane, 4> kPlanes{
 
 }  // namespace
 
+// The pressure is the one root of a falling function: where the search starts cannot matter. 1 Pa
+// is a tenth of its tolerance of 1e-7 of the pressure at yield, which Newton betters by far.
+TEST_CASE("the pressure of the tube does not depend on where its search starts") {
+  const Heated heated;
+  int pressed = 0;
+  for (const double t_min : {0.0, 5.0, 20.0}) {
+    const HotSection section = heated.at(t_min, ConfinementModel::contact);
+    for (double eps0 = 0.0; eps0 < 0.02; eps0 += 0.0004) {
+      for (const double kappa : {0.0, 0.01, -0.04}) {
+        const double from_none_Pa = section.response({eps0, kappa, 0.3 * kappa}).pressure_Pa;
+        pressed += from_none_Pa > 0.0 ? 1 : 0;
+        for (const double likely_Pa : {1e3, 1e6, 5e6, 1e9}) {
+          CAPTURE(t_min, eps0, kappa, likely_Pa);
+          CHECK(section.response({eps0, kappa, 0.3 * kappa}, likely_Pa).pressure_Pa ==
+                Approx(from_none_Pa).margin(1.0));
+        }
+      }
+    }
+  }
+  CHECK(pressed > 100);
+}
+
 TEST_CASE("the tangent of a section is the derivative of its forces, with every confinement") {
   const Heated heated;
   for (const ConfinementModel model :

@@ -95,6 +95,10 @@ ProgressLine::ProgressLine(const std::string& what) {
   if (isatty(STDERR_FILENO) == 1) write_stderr(what + " ...");
 }
 
+void ProgressLine::show(const std::string& what) {
+  if (isatty(STDERR_FILENO) == 1) write_stderr("\r\x1b[K" + what);
+}
+
 ProgressLine::~ProgressLine() {
   if (isatty(STDERR_FILENO) == 1) write_stderr("\r\x1b[K");
 }

@@ -44,6 +44,8 @@ class ProgressLine {
  public:
   explicit ProgressLine(const std::string& what);
   ~ProgressLine();
+  /// Replaces the line, for something that goes on in steps.
+  void show(const std::string& what);
   ProgressLine(const ProgressLine&) = delete;
   ProgressLine& operator=(const ProgressLine&) = delete;
 };

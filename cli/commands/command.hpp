@@ -21,6 +21,9 @@ struct Command {
 [[nodiscard]] Command add_field(CLI::App& root);
 [[nodiscard]] Command add_capacity(CLI::App& root);
 [[nodiscard]] Command add_gas(CLI::App& root);
+[[nodiscard]] Command add_compare(CLI::App& root);
+[[nodiscard]] Command add_size(CLI::App& root);
+[[nodiscard]] Command add_sensitivity(CLI::App& root);
 [[nodiscard]] Command add_evidence(CLI::App& root);
 [[nodiscard]] Command add_explain(CLI::App& root);
 [[nodiscard]] Command add_new(CLI::App& root);

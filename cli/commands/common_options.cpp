@@ -54,6 +54,10 @@ void add_column_options(CLI::App& app, CommonOptions& options, ColumnNeed need) 
       app.add_option("COLUMN.toml", options.column, "Column file; - reads standard input");
   column->type_name("");
   if (need == ColumnNeed::required) column->required();
+  add_set_option(app, options);
+}
+
+void add_set_option(CLI::App& app, CommonOptions& options) {
   app.add_option("--set", options.overrides,
                  "Override one input key, in TOML: tube.thickness_mm=6 or bars[0].axis_mm=50; "
                  "repeatable")

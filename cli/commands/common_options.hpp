@@ -27,6 +27,8 @@ struct CommonOptions {
 enum class ColumnNeed { required, optional };
 
 void add_column_options(CLI::App& app, CommonOptions& options, ColumnNeed need);
+/// `--set` alone, for a command whose first argument is no column file.
+void add_set_option(CLI::App& app, CommonOptions& options);
 void add_result_options(CLI::App& app, CommonOptions& options);
 
 /// The forms a result can take; only those asked for are made.

@@ -131,9 +131,10 @@ std::vector<KeySpec> protection_keys() {
       {.key = "protection.thickness_mm",
        .need = Need::required,
        .unit = "mm",
-       .range = closed(0.1, 500),
+       .range = closed(0, 500),
        .example = "25",
-       .help = "Thickness of the layer.",
+       .help = "Thickness of the layer; 0: no layer, the other keys of the table then count for "
+               "nothing.",
        .advice = kLengths},
       {.key = "protection.conductivity_W_mK",
        .type = KeyType::number_or_pair_list,

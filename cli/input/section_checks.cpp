@@ -19,6 +19,8 @@ using thermal::Section;
 
 // Positions are typed in mm; this much rounding is no overlap.
 constexpr double kTouch_m = 1e-9;
+// A coat of paint is no layer of the heat flow.
+constexpr double kThinnestLayer_m = 1e-4;
 
 /// From a point to the nearest face of the core, negative outside [m].
 double depth_in_core_m(const Section& section, const Point& point) {
@@ -43,6 +45,7 @@ class SectionChecks {
 
   void run() {
     check_tube();
+    check_protection();
     if (section_.steel_shape) check_shape(*section_.steel_shape);
     for (std::size_t i = 0; i < section_.bars.size(); ++i) {
       check_cover(i);
@@ -63,6 +66,13 @@ class SectionChecks {
              fmt::format("{:.6g} mm leaves no core; it must be below half the section, {:.6g} mm",
                          mm_from_m(section_.tube_thickness_m()), mm_from_m(half_m)));
     }
+  }
+
+  void check_protection() {
+    if (!section_.protection || section_.protection->thickness_m >= kThinnestLayer_m) return;
+    refuse("protection.thickness_mm",
+           fmt::format("{:.6g} mm is thinner than a layer can be, {:.6g} mm; give 0 for none",
+                       mm_from_m(section_.protection->thickness_m), mm_from_m(kThinnestLayer_m)));
   }
 
   void check_shape(const thermal::SteelShape& shape) {

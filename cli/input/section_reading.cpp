@@ -201,7 +201,8 @@ Section read_section(InputValues& values, Problems& problems) {
   if (values.has_table("tube")) section.tube = read_tube(values);
   section.core = read_core(values);
   if (values.has_table("steel_shape")) section.steel_shape = read_shape(values);
-  if (values.has_table("protection")) section.protection = read_protection(values);
+  const bool has_layer = values.number("protection.thickness_mm") > 0;
+  if (values.has_table("protection") && has_layer) section.protection = read_protection(values);
   if (values.text("section.shape").empty()) return section;
   for (std::size_t i = 0; i < values.group_count("bars"); ++i) {
     if (!values.has_table(fmt::format("bars[{}]", i))) continue;

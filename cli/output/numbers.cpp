@@ -39,6 +39,10 @@ std::string fixed(const std::optional<double>& value, int digits) {
   return value ? fixed(*value, digits) : "-";
 }
 
+std::string tenths_down(double minutes) { return fixed(std::floor(minutes * 10 + 1e-6) / 10, 1); }
+
+std::string tenths_up(double minutes) { return fixed(std::ceil(minutes * 10 - 1e-6) / 10, 1); }
+
 std::string shortest(double value) { return fmt::format("{}", value); }
 
 }  // namespace ringward::cli

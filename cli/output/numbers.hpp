@@ -27,6 +27,11 @@ inline constexpr int kDigitsRatio = 4;
 [[nodiscard]] std::string fixed(double value, int digits);
 [[nodiscard]] std::string fixed(const std::optional<double>& value, int digits);
 
+/// Minutes with one decimal, rounded down: a time that the column has surely reached.
+[[nodiscard]] std::string tenths_down(double minutes);
+/// Minutes with one decimal, rounded up: for an uncertainty.
+[[nodiscard]] std::string tenths_up(double minutes);
+
 /// The shortest text that reads back as `value`: "30", "7.5".
 [[nodiscard]] std::string shortest(double value);
 

@@ -23,11 +23,13 @@ class TextTable {
   /// Appends a row whose first cell is a word and the rest numbers.
   void add(const std::string& first, const std::vector<std::optional<double>>& numbers);
 
+  /// Appends a row of cells as they are to be shown, "-" for none.
+  void add_cells(std::vector<std::string> cells) { rows_.push_back(std::move(cells)); }
+
   /// @return the lines, each indented by two spaces; columns without any number are left out
   [[nodiscard]] std::string text() const;
 
  private:
-  void add_cells(std::vector<std::string> cells) { rows_.push_back(std::move(cells)); }
   [[nodiscard]] std::size_t width(std::size_t column) const;
   [[nodiscard]] bool is_empty(std::size_t column) const;
 

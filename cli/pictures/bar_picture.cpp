@@ -70,6 +70,9 @@ Picture draw(const BarPicture& picture) {
   script.set_axes({.label = picture.axis_label}, {.label = "", .low = -count + 0.45, .high = 0.55});
   script.add("set offsets graph 0.04, graph 0.04, 0, 0");
   script.add("set border 1");
+  // Long names leave a narrow plot: the key goes above all of the picture.
+  script.add("set key at screen 0.99, screen 0.985 right top");
+  script.add("set tmargin 3");
   script.add(row_names(script, rows));
   const std::string centre = gnuplot_number(picture.centre);
   script.add("set arrow from first " + centre + ", graph 0 to first " + centre +

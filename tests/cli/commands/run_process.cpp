@@ -2,6 +2,7 @@
 
 #include <fcntl.h>
 #include <pty.h>
+#include <sys/resource.h>
 #include <sys/wait.h>
 #include <unistd.h>
 
@@ -32,10 +33,10 @@ void put_on(int descriptor, const std::string& path, int flags) {
   _exit(127);
 }
 
-int exit_code_of(pid_t child) {
+int exit_code_of(pid_t child, rusage* usage = nullptr) {
   int status = 0;
-  while (waitpid(child, &status, 0) < 0) {
-    if (errno != EINTR) throw std::runtime_error("waitpid failed");
+  while (wait4(child, &status, 0, usage) < 0) {
+    if (errno != EINTR) throw std::runtime_error("wait4 failed");
   }
   return WIFEXITED(status) ? WEXITSTATUS(status) : 128 + WTERMSIG(status);
 }
@@ -66,10 +67,12 @@ ProcessResult run_command(const std::vector<std::string>& command, const Process
   }
   if (setup.interrupt_after_ms > 0) {
     usleep(static_cast<useconds_t>(setup.interrupt_after_ms) * 1000);
-    kill(child, SIGINT);
+    kill(child, setup.interrupt_signal);
   }
   ProcessResult result;
-  result.exit_code = exit_code_of(child);
+  rusage usage{};
+  result.exit_code = exit_code_of(child, &usage);
+  result.peak_kB = usage.ru_maxrss;
   if (setup.stdout_device.empty()) result.out = file_content(streams / "out");
   result.err = file_content(streams / "err");
   return result;

@@ -12,6 +12,7 @@ struct ProcessResult {
   int exit_code = -1;  ///< 128 + n when signal n killed it
   std::string out;
   std::string err;
+  long peak_kB = 0;  ///< largest resident size of a process run without a terminal
 };
 
 /// How the real program is started. Output goes to files unless a device is named.
@@ -22,6 +23,7 @@ struct ProcessSetup {
   std::string stdout_device = {};                     ///< e.g. "/dev/full"
   bool close_stdout = false;
   int interrupt_after_ms = 0;  ///< 0: never
+  int interrupt_signal = 2;    ///< SIGINT
 };
 
 /// Runs RINGWARD_BINARY and waits for its end.

@@ -55,6 +55,8 @@ void set_up_child(const ProcessSetup& setup) {
 ProcessResult run_command(const std::vector<std::string>& command, const ProcessSetup& setup) {
   const TemporaryFolder streams;
   write_content(streams / "in", setup.stdin_text);
+  for (const char* name : {"out", "err"})
+    write_content(streams / name, "");  // killed before it starts
   const std::string out = setup.stdout_device.empty() ? streams / "out" : setup.stdout_device;
   const pid_t child = fork();
   if (child == 0) {

@@ -1,5 +1,9 @@
 #include <fmt/format.h>
 
+#include <algorithm>
+#include <limits>
+#include <map>
+
 #include "cli/output/cautions.hpp"
 #include "cli/output/numbers.hpp"
 #include "cli/page/html_page.hpp"
@@ -101,6 +105,50 @@ void add_unsolved(HtmlPage& page, const RankedStudy& study) {
   page.table(table);
 }
 
+std::vector<std::string> keys_with_words(const RankedStudy& study) {
+  std::vector<std::string> keys;
+  for (const std::string& key : study.varied) {
+    const bool has_words =
+        std::any_of(study.rows.begin(), study.rows.end(), [&](const LayoutRow& row) {
+          return std::any_of(row.values.begin(), row.values.end(), [&](const EchoEntry& entry) {
+            return entry.key == key && std::holds_alternative<std::string>(entry.value);
+          });
+        });
+    if (has_words) keys.push_back(key);
+  }
+  return keys;
+}
+
+/// What a key that holds words makes of the fire resistance.
+struct WordAnswers {
+  std::size_t layouts = 0;
+  double shortest_min = std::numeric_limits<double>::infinity();
+  double longest_min = 0;
+};
+
+void add_word_table(HtmlPage& page, const RankedStudy& study, const std::string& key) {
+  std::map<std::string, WordAnswers> answers;
+  for (const LayoutRow& row : study.rows) {
+    if (!row.verdict) continue;
+    WordAnswers& of_value = answers[value_words(row, key)];
+    ++of_value.layouts;
+    of_value.shortest_min = std::min(of_value.shortest_min, row.verdict->assessed_min);
+    of_value.longest_min = std::max(of_value.longest_min, row.verdict->assessed_min);
+  }
+  using enum CellKind;
+  HtmlTable table("Fire resistance less uncertainty for each value of " + key,
+                  {{key, "", words},
+                   {"Layouts", "", number},
+                   {"Shortest", "min", number},
+                   {"Longest", "min", number}});
+  for (const auto& [value, of_value] : answers) {
+    table.add(std::vector<std::string>{value, std::to_string(of_value.layouts),
+                                       tenths_down(of_value.shortest_min),
+                                       tenths_down(of_value.longest_min)});
+  }
+  page.table(table);
+}
+
 /// @return why pictures are missing, empty when none is
 std::string add_pictures(HtmlPage& page, const RankedStudy& study) {
   page.heading(2, "Trade-off");
@@ -108,8 +156,10 @@ std::string add_pictures(HtmlPage& page, const RankedStudy& study) {
   page.figure(trade_off.picture, trade_off.caption);
   std::string missing = trade_off.picture.why_missing;
   const std::vector<CaptionedPicture> pictures = key_pictures(study);
-  if (!pictures.empty()) page.heading(2, "What moves the fire resistance");
+  const std::vector<std::string> with_words = keys_with_words(study);
+  if (!pictures.empty() || !with_words.empty()) page.heading(2, "What moves the fire resistance");
   for (const CaptionedPicture& picture : pictures) page.figure(picture.picture, picture.caption);
+  for (const std::string& key : with_words) add_word_table(page, study, key);
   return missing;
 }
 

@@ -80,6 +80,19 @@ TEST_CASE("The folder holds a whole log, a table in the order of the study and a
   CHECK(run_program({"xmllint", "--noout", study / "out/compare.html"}).exit_code == 0);
 }
 
+TEST_CASE(
+    "The page says for every varied quantity what it does, in a picture or, for words, a table",
+    "[study]") {
+  const StudyFolder study(
+      "[grid]\n\"core.aggregate\" = [\"siliceous\", \"calcareous\"]\n\"load.axial_kN\" = [400, "
+      "500]\n\"core.strength_MPa\" = [30]\n");
+  REQUIRE(study.compare("out").exit_code == 0);
+  const std::string page = file_content(study / "out/compare.html");
+  CHECK(mentions(page, "Fire resistance against load.axial_kN"));
+  CHECK(mentions(page, "Fire resistance less uncertainty for each value of core.aggregate"));
+  CHECK_FALSE(mentions(page, "against core.strength_MPa"));  // the same in all
+}
+
 TEST_CASE("Names and values of users stay text in page, table and log", "[study]") {
   const std::string name = "<script>alert('x')</script> & \\\"quotes\\\", `date` $(id) {/Bold b}";
   const StudyFolder study("[[layout]]\nname = \"" + name +

@@ -12,11 +12,14 @@ build_packages=(
   libcli11-dev libtomlplusplus-dev nlohmann-json3-dev libfmt-dev libssl-dev
   libtbb-dev libboost-dev libglib2.0-dev pkg-config
 )
-# What the program runs for pictures; without it results are complete but have none.
-recommended_packages=(gnuplot-nox)
-# What only the tests use: the test framework, a reader of XML to check files with, and a numerical
-# library for an independent solution.
-test_packages=(catch2 libxml2-utils python3-scipy)
+# What the program runs for pictures and for PDF; without it results are complete but have none.
+recommended_packages=(gnuplot-nox weasyprint)
+# What only the tests use: the test framework, readers of XML and PDF to check files with, a
+# numerical library for an independent solution, and a browser to look at pages.
+test_packages=(
+  catch2 libxml2-utils poppler-utils qpdf python3-scipy
+  chromium chromium-driver
+)
 
 say() { printf '%s\n' "-- $*" >&2; }
 

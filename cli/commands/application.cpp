@@ -48,9 +48,9 @@ ExitCode run_chosen(const std::vector<Command>& commands) {
 }
 
 std::vector<Command> add_commands(CLI::App& root) {
-  return {add_rate(root),    add_field(root), add_capacity(root),    add_gas(root),
-          add_compare(root), add_size(root),  add_sensitivity(root), add_evidence(root),
-          add_explain(root), add_new(root)};
+  return {add_rate(root),     add_field(root),   add_capacity(root),    add_gas(root),
+          add_compare(root),  add_size(root),    add_sensitivity(root), add_dossier(root),
+          add_evidence(root), add_explain(root), add_new(root)};
 }
 
 std::string unknown_command(const CLI::App& root, const std::string& word) {

@@ -24,6 +24,7 @@ struct Command {
 [[nodiscard]] Command add_compare(CLI::App& root);
 [[nodiscard]] Command add_size(CLI::App& root);
 [[nodiscard]] Command add_sensitivity(CLI::App& root);
+[[nodiscard]] Command add_dossier(CLI::App& root);
 [[nodiscard]] Command add_evidence(CLI::App& root);
 [[nodiscard]] Command add_explain(CLI::App& root);
 [[nodiscard]] Command add_new(CLI::App& root);

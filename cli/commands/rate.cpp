@@ -5,23 +5,13 @@
 #include "cli/commands/common_options.hpp"
 #include "cli/input/reader.hpp"
 #include "cli/output/rate_report.hpp"
-#include "thermal/base/units.hpp"
 
 namespace ringward::cli {
 namespace {
 
 RateReport rated(ColumnInput input) {
   const ProgressLine progress("rating the column");
-  RateReport report;
-  report.rating = mechanical::rate(input.column, input.fire, input.accuracy);
-  std::optional<double> required_min;
-  if (input.required_s) required_min = units::min_from_s(*input.required_s);
-  report.verdict = judge(report.rating, input.has_classes, required_min);
-  report.notices = input.notices;
-  report.notices.insert(report.notices.end(), report.rating.notices.begin(),
-                        report.rating.notices.end());
-  report.input = std::move(input);
-  return report;
+  return rate_report(std::move(input));
 }
 
 ExitCode run_rate(const CommonOptions& options) {

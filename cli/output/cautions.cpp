@@ -46,28 +46,27 @@ std::string notices_text(const Notices& notices, const Style& style) {
   return text + "\n";
 }
 
-std::string standing_cautions(CautionForm form, const Style& style) {
-  const std::string heading = style.bold("Before anyone relies on this") + "\n";
+std::vector<std::string> standing_caution_sentences(CautionForm form) {
   if (form == CautionForm::brief) {
-    return heading +
-           bullet(
-               "A calculation aid: a licensed engineer has to check it; local codes and the "
-               "authority decide.") +
-           bullet(
-               "Not in the model: spalling, joints, tube vents, restraint, construction "
-               "defects.");
+    return {
+        "A calculation aid: a licensed engineer has to check it; local codes and the authority "
+        "decide.",
+        "Not in the model: spalling, joints, tube vents, restraint, construction defects."};
   }
-  return heading +
-         bullet(
-             "This is a calculation aid. A licensed engineer has to check the input, the model "
-             "and the result, and answers for them.") +
-         bullet(
-             "Local codes and the authority decide what is accepted. Nothing here is an "
-             "approval or a classification report.") +
-         bullet(
-             "Not in the model: spalling of the concrete; the joints, and the strip of core "
-             "that is bare at a tube's end gaps; steam pressure in a tube without vent holes; "
-             "restraint by the rest of the building; construction defects.");
+  return {
+      "This is a calculation aid. A licensed engineer has to check the input, the model and the "
+      "result, and answers for them.",
+      "Local codes and the authority decide what is accepted. Nothing here is an approval or a "
+      "classification report.",
+      "Not in the model: spalling of the concrete; the joints, and the strip of core that is bare "
+      "at a tube's end gaps; steam pressure in a tube without vent holes; restraint by the rest of "
+      "the building; construction defects."};
+}
+
+std::string standing_cautions(CautionForm form, const Style& style) {
+  std::string text = style.bold("Before anyone relies on this") + "\n";
+  for (const std::string& sentence : standing_caution_sentences(form)) text += bullet(sentence);
+  return text;
 }
 
 }  // namespace ringward::cli

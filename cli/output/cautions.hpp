@@ -1,6 +1,7 @@
 #pragma once
 
 #include <string>
+#include <vector>
 
 #include "cli/terminal.hpp"
 #include "thermal/base/notice.hpp"
@@ -15,6 +16,7 @@ enum class CautionForm { full, brief };
 
 /// What stands at the end of every result that a person reads.
 [[nodiscard]] std::string standing_cautions(CautionForm form, const Style& style);
+[[nodiscard]] std::vector<std::string> standing_caution_sentences(CautionForm form);
 
 /// `notices` in the order they are shown: cautions first, repeated ones once.
 [[nodiscard]] Notices ordered_notices(const Notices& notices);

@@ -49,4 +49,14 @@ Field field_of(const Section& section, const TemperatureHistory& history,
   return field;
 }
 
+ColourBands bands_for(const std::vector<FieldState>& states) {
+  double min_C = states.front().min_C;
+  double max_C = states.front().max_C;
+  for (const FieldState& state : states) {
+    min_C = std::min(min_C, state.min_C);
+    max_C = std::max(max_C, state.max_C);
+  }
+  return {min_C, max_C};
+}
+
 }  // namespace ringward::cli

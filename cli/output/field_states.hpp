@@ -3,6 +3,7 @@
 #include <optional>
 #include <vector>
 
+#include "cli/output/colour_bands.hpp"
 #include "thermal/section/section.hpp"
 #include "thermal/temperature_history.hpp"
 
@@ -41,5 +42,8 @@ struct Field {
                              const thermal::TemperatureHistory& history,
                              const std::vector<double>& times_s,
                              const std::vector<thermal::Point>& probes);
+
+/// Bands for the temperatures of all the states.
+[[nodiscard]] ColourBands bands_for(const std::vector<FieldState>& states);
 
 }  // namespace ringward::cli

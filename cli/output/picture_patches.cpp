@@ -125,4 +125,16 @@ std::string temperature_patches(const WholeSection& whole, const std::vector<dou
                             edges);
 }
 
+std::vector<double> patch_temperatures(const WholeSection& whole,
+                                       const thermal::TemperatureHistory& history, double time_s) {
+  std::vector<double> patches_C;
+  patches_C.reserve(whole.count_1() * whole.count_2());
+  for (std::size_t j = 0; j < whole.count_2(); ++j) {
+    for (std::size_t i = 0; i < whole.count_1(); ++i) {
+      patches_C.push_back(history.T_C(middle(whole, i, j), time_s));
+    }
+  }
+  return patches_C;
+}
+
 }  // namespace ringward::cli

@@ -5,6 +5,7 @@
 
 #include "cli/output/colour_bands.hpp"
 #include "cli/output/whole_section.hpp"
+#include "thermal/temperature_history.hpp"
 
 namespace ringward::cli {
 
@@ -15,5 +16,11 @@ namespace ringward::cli {
 [[nodiscard]] std::string temperature_patches(const WholeSection& whole,
                                               const std::vector<double>& patches_C,
                                               const ColourBands& bands, double px_per_m);
+
+/// The temperature in the middle of each patch at one time, between cells interpolated as for
+/// probes.
+[[nodiscard]] std::vector<double> patch_temperatures(const WholeSection& whole,
+                                                     const thermal::TemperatureHistory& history,
+                                                     double time_s);
 
 }  // namespace ringward::cli

@@ -18,6 +18,10 @@ struct RateReport {
   Notices notices;  ///< of the input and of the rating
 };
 
+/// Rates the column and judges it.
+/// @throws Error(solver_breakdown)
+[[nodiscard]] RateReport rate_report(ColumnInput input, const mechanical::RatingScope& scope = {});
+
 /// The result in ten seconds, then notices, history and cautions.
 [[nodiscard]] std::string rate_text(const RateReport& report, const Style& style);
 

@@ -147,22 +147,10 @@ struct Drawing {
   ColourBands bands;
 };
 
-std::vector<double> sampled(const WholeSection& whole, const thermal::TemperatureHistory& history,
-                            double time_s) {
-  std::vector<double> patches_C;
-  patches_C.reserve(whole.count_1() * whole.count_2());
-  for (std::size_t j = 0; j < whole.count_2(); ++j) {
-    for (std::size_t i = 0; i < whole.count_1(); ++i) {
-      patches_C.push_back(history.T_C(middle(whole, i, j), time_s));
-    }
-  }
-  return patches_C;
-}
-
 std::string panel(const PictureSubject& subject, const Drawing& drawing,
                   const thermal::TemperatureHistory& history, const FieldState& state) {
   const Page& page = drawing.page;
-  const std::vector<double> patches_C = sampled(drawing.whole, history, state.time_s);
+  const std::vector<double> patches_C = patch_temperatures(drawing.whole, history, state.time_s);
   const double middle_y = kPanelHeading_px + kAroundSection_px + page.section_depth / 2;
   const std::string heading = fmt::format(
       "{} min, gas {} \xC2\xB0"
@@ -174,16 +162,6 @@ std::string panel(const PictureSubject& subject, const Drawing& drawing,
          temperature_patches(drawing.whole, patches_C, drawing.bands, page.px_per_m) +
          section_outlines(*subject.section, page.px_per_m) +
          heated_outline(*subject.section, *subject.exposed, page.px_per_m) + "</g>\n";
-}
-
-ColourBands bands_for(const std::vector<FieldState>& states) {
-  double min_C = states.front().min_C;
-  double max_C = states.front().max_C;
-  for (const FieldState& state : states) {
-    min_C = std::min(min_C, state.min_C);
-    max_C = std::max(max_C, state.max_C);
-  }
-  return {min_C, max_C};
 }
 
 }  // namespace

@@ -1,5 +1,7 @@
 #pragma once
 
+#include <cstddef>
+#include <optional>
 #include <string>
 #include <utility>
 #include <vector>
@@ -19,6 +21,8 @@ class HtmlPage {
   /// @param level 1 to 4; the first is 1, and none is skipped going down
   /// @throws std::logic_error for a level that would skip one
   void heading(int level, const std::string& text);
+  /// Here stands the list of all headings of level 2, with links to them.
+  void contents();
   void paragraph(const std::string& text);
   void paragraph(const Markup& content) { block(Markup::element("p", content)); }
   void list(const std::vector<std::string>& items);
@@ -41,7 +45,11 @@ class HtmlPage {
   std::string title_;
   std::string body_;
   std::string script_;
+  std::vector<std::string> parts_;  ///< texts of the headings of level 2, escaped
+  std::optional<std::size_t> contents_at_;
   int level_ = 0;
+
+  [[nodiscard]] std::string contents_list() const;
 };
 
 }  // namespace ringward::cli

@@ -1,5 +1,7 @@
 #include "cli/page/html_table.hpp"
 
+#include <algorithm>
+
 #include "cli/output/xml_text.hpp"
 
 namespace ringward::cli {
@@ -15,6 +17,21 @@ void HtmlTable::add(const std::vector<std::string>& cells) {
   std::vector<Markup> row;
   for (const std::string& cell : cells) row.push_back(Markup::text(cell));
   add_marked(std::move(row));
+}
+
+bool HtmlTable::has_shares() const {
+  return std::any_of(columns_.begin(), columns_.end(),
+                     [](const Column& column) { return column.share_percent > 0; });
+}
+
+std::string HtmlTable::widths() const {
+  std::string html = "<colgroup>";
+  for (const Column& column : columns_) {
+    html += column.share_percent == 0
+                ? "<col/>"
+                : "<col style=\"width: " + std::to_string(column.share_percent) + "%\"/>";
+  }
+  return html + "</colgroup>\n";
 }
 
 std::string HtmlTable::heading() const {
@@ -45,8 +62,8 @@ Markup HtmlTable::markup() const {
   const std::string caption = xml_text(caption_);
   // A table that is wider than the screen scrolls by itself, also with the keyboard.
   return Markup::own("<div class=\"wide\" role=\"region\" tabindex=\"0\" aria-label=\"" + caption +
-                     "\"><table><caption>" + caption + "</caption>\n" + heading() + body() +
-                     "</table></div>");
+                     "\"><table" + (has_shares() ? " class=\"shared\"" : "") + "><caption>" +
+                     caption + "</caption>\n" + widths() + heading() + body() + "</table></div>");
 }
 
 }  // namespace ringward::cli

@@ -16,6 +16,7 @@ class HtmlTable {
     std::string name;
     std::string unit = {};  ///< below the name
     CellKind kind = CellKind::words;
+    int share_percent = 0;  ///< of the width; 0 leaves it to the browser
   };
 
   HtmlTable(std::string caption, std::vector<Column> columns)
@@ -29,6 +30,8 @@ class HtmlTable {
   [[nodiscard]] Markup markup() const;
 
  private:
+  [[nodiscard]] bool has_shares() const;
+  [[nodiscard]] std::string widths() const;
   [[nodiscard]] std::string heading() const;
   [[nodiscard]] std::string body() const;
 

@@ -30,6 +30,7 @@ pre {
 .wide { overflow-x: auto; margin: 1rem 0 1.3rem; }
 .wide:focus-visible, input:focus-visible, a:focus-visible { outline: 3px solid #003f7f; outline-offset: 2px; }
 table { border-collapse: collapse; width: 100%; font-size: 0.84rem; line-height: 1.35; }
+table.shared { table-layout: fixed; min-width: 36rem; overflow-wrap: anywhere; }
 caption { text-align: left; font-weight: bold; padding: 0 0 0.4rem; }
 th, td { padding: 0.28rem 0.6rem; text-align: left; vertical-align: top; border-bottom: 1px solid #c9c9c9; }
 thead th { border-bottom: 1.5px solid #1a1a1a; vertical-align: bottom; }
@@ -42,12 +43,22 @@ figcaption { font-size: 0.86rem; padding-top: 0.4rem; color: #333; }
 .missing { padding: 0.7rem 0.9rem; border: 1px dashed #6b6b6b; }
 .boxed { border: 2px solid #1a1a1a; padding: 0.7rem 1rem; margin: 1rem 0 1.2rem; }
 .boxed p { margin: 0.25rem 0; }
-dl.pairs { display: grid; grid-template-columns: minmax(9rem, 30%) 1fr; gap: 0.2rem 1rem; }
-dl.pairs dt { color: #4a4a4a; }
-dl.pairs dd { margin: 0; }
+table.pairs { margin: 0.8rem 0 1.1rem; font-size: 0.9rem; }
+.pairs th { width: 28%; color: #4a4a4a; }
+.pairs th, .pairs td { border-bottom: 1px solid #e3e3e3; padding-left: 0; overflow-wrap: anywhere; }
+ol.contents { list-style: none; padding-left: 0; columns: 2; column-gap: 2rem; font-size: 0.9rem; }
+.checklist { list-style: none; padding-left: 0; }
+.checklist li { padding-left: 1.7rem; text-indent: -1.7rem; }
+.checklist li::before {
+  content: ""; display: inline-block; width: 0.75rem; height: 0.75rem; margin-right: 0.95rem;
+  border: 1.2px solid #1a1a1a;
+}
+.formula { padding-left: 1.4rem; font-family: "Liberation Serif", Georgia, serif; font-style: italic; }
+.slider { display: flex; flex-wrap: wrap; align-items: center; gap: 0.8rem; margin-top: 0.6rem; }
+.slider[hidden] { display: none; }
+.slider input { flex: 1 1 14rem; min-height: 1.6rem; }
 @media (max-width: 30rem) {
-  dl.pairs { grid-template-columns: 1fr; gap: 0; }
-  dl.pairs dd { margin: 0 0 0.5rem; }
+  ol.contents { columns: 1; }
 }
 @page {
   size: A4; margin: 20mm 22mm 22mm 24mm;
@@ -61,13 +72,16 @@ dl.pairs dd { margin: 0; }
   body { padding: 0; max-width: none; font-size: 9.6pt; }
   h1, h2, h3, h4, caption { break-after: avoid; }
   h2 { margin-top: 1.6rem; }
-  tr, figure, .boxed, dl.pairs > * { break-inside: avoid; }
+  tr, figure, .boxed { break-inside: avoid; }
   thead { display: table-header-group; }
   .wide { overflow: visible; }
   table { font-size: 8.4pt; }
-  pre { font-size: 7.6pt; }
+  table.shared { min-width: 0; }
+  pre { font-size: 7.1pt; }
   p, li { orphans: 3; widows: 3; }
   .screen-only { display: none; }
+  ol.contents a { color: inherit; text-decoration: none; }
+  ol.contents a::after { content: " " target-counter(attr(href), page); color: #4a4a4a; }
 }
 )css";
 }

@@ -90,8 +90,10 @@ void add_marks(GnuplotScript& script, const LinePicture& picture) {
     const std::string at = gnuplot_number(mark.at);
     script.add("set arrow from graph 0, first " + at + " to graph 1, first " + at + " " +
                kMarkLine);
-    script.add("set label " + script.text(mark.name) + " at graph 0.99, first " + at +
-               " right offset character 0,0.5 font ',10.5' front");
+    const std::string place = mark.name_at_start ? "0.012" : "0.99";
+    script.add("set label " + script.text(mark.name) + " at graph " + place + ", first " + at +
+               (mark.name_at_start ? " left" : " right") +
+               " offset character 0,0.5 font ',10.5' front");
   }
 }
 

@@ -21,6 +21,7 @@ struct PictureSeries {
 struct PictureMark {
   double at = 0;
   std::string name;
+  bool name_at_start = false;  ///< of a horizontal mark: at its left end, else at its right end
 };
 
 /// A shaded range between two curves.

@@ -10,8 +10,9 @@ using namespace ringward::testing;
 
 namespace {
 
-const std::vector<std::string> kCommands{"rate", "field",       "capacity", "gas",     "compare",
-                                         "size", "sensitivity", "evidence", "explain", "new"};
+const std::vector<std::string> kCommands{"rate",     "field",   "capacity",    "gas",
+                                         "compare",  "size",    "sensitivity", "dossier",
+                                         "evidence", "explain", "new"};
 
 bool contains(const std::string& text, const std::string& part) {
   return text.find(part) != std::string::npos;

@@ -2,6 +2,8 @@
 
 #include <catch2/catch.hpp>
 
+#include "cli/input/sha256.hpp"
+#include "cli/output/base64.hpp"
 #include "cli/output/xml_text.hpp"
 #include "tests/cli/page/xml_check.hpp"
 
@@ -74,6 +76,41 @@ TEST_CASE("Every column and every row of a table has a heading with its scope", 
   CHECK(occurrences(html, "<th scope=\"row\"") == 2);
   CHECK(occurrences(html, "<td") == 2);
   CHECK(html.find("<caption>Caption</caption>") != std::string::npos);
+}
+
+TEST_CASE("The contents list every heading of level 2 and link to it", "[page]") {
+  HtmlPage page("title");
+  page.heading(1, "one");
+  page.contents();
+  page.heading(2, "first <part>");
+  page.heading(3, "no part");
+  page.heading(2, "second");
+  const std::string html = page.html();
+  CHECK(attribute_values(html, "href") == std::vector<std::string>{"#part-1", "#part-2"});
+  CHECK(occurrences(html, "id=\"part-") == 2);
+  CHECK(html.find("#part-1\">first &lt;part&gt;</a>") < html.find("<h2"));
+}
+
+TEST_CASE("A page allows nothing to be fetched and no script but its own", "[page]") {
+  HtmlPage page("title");
+  page.heading(1, "one");
+  CHECK(page.html().find("default-src 'none'; style-src 'unsafe-inline'; img-src data:; "
+                         "script-src 'none'") != std::string::npos);
+  page.script("let x = 1;\n");
+  const std::string html = page.html();
+  const std::string script = "\nlet x = 1;\n";
+  CHECK(html.find("<script>" + script + "</script>") != std::string::npos);
+  CHECK(html.find("script-src 'sha256-" + base64(sha256_bytes(script)) + "'\"") !=
+        std::string::npos);
+}
+
+// RFC 4648, section 10: test vectors, from memory.
+TEST_CASE("Bytes become base64", "[page]") {
+  CHECK(base64("").empty());
+  CHECK(base64("f") == "Zg==");
+  CHECK(base64("fo") == "Zm8=");
+  CHECK(base64("foobar") == "Zm9vYmFy");
+  CHECK(base64(std::string("\xFF\x00\xFE", 3)) == "/wD+");
 }
 
 TEST_CASE("Lines of a verbatim text stay lines", "[page]") {

@@ -2,6 +2,7 @@
 
 #include <fmt/format.h>
 
+#include <algorithm>
 #include <cmath>
 
 #include "mechanical/rating/rating.hpp"
@@ -43,6 +44,9 @@ UncertaintyRow study_uncertainty(unsigned index) {
     UncertaintyRow row;
     row.index = index;
     row.breakdown = error.what();
+    // A quotation mark would end the field of the CSV line, a new line the row.
+    std::replace(row.breakdown.begin(), row.breakdown.end(), '"', '\'');
+    std::replace(row.breakdown.begin(), row.breakdown.end(), '\n', ' ');
     return row;
   }
 }

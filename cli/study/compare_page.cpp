@@ -32,10 +32,10 @@ std::string summary(const RankedStudy& study) {
 }
 
 void add_cautions_box(HtmlPage& page, const RankedStudy& study) {
-  Markup content = Markup::element(
-      "p", Markup::text("This is a calculation aid. A licensed engineer has to check the input, "
-                        "the model and the results, and answers for them. Local codes and the "
-                        "authority decide what is accepted. Nothing here is an approval."));
+  Markup content;
+  for (const std::string& sentence : standing_caution_sentences(CautionForm::full)) {
+    content += Markup::element("p", Markup::text(sentence));
+  }
   if (!study.kept_from.empty()) {
     content += Markup::element(
         "p", Markup::text("Some rows were kept by force from version " + study.kept_from +
@@ -174,10 +174,7 @@ void add_shared_cautions(HtmlPage& page, const RankedStudy& study) {
   }
   if (!table.is_empty()) page.table(table);
   page.paragraph(
-      "Not in the model: spalling of the concrete; the joints, and the strip of core that is bare "
-      "at a tube's end gaps; steam pressure in a tube without vent holes; restraint by the rest of "
-      "the building; construction defects. ringward rate gives each layout's history, notes and "
-      "the band of confinement models.");
+      "ringward rate gives each layout's history, notes and the band of confinement models.");
 }
 
 }  // namespace

@@ -13,7 +13,8 @@ namespace ringward::cli {
 namespace {
 
 constexpr double kSameValue = 1e-9;
-/// A margin of zero meets the requirement; the solver must not take it for the crossing itself.
+/// A margin that rounds to zero is on one side all the same; the solver must not take it for the
+/// crossing itself.
 constexpr double kJustMet_min = 1e-6;
 
 /// Thrown through the solver when no more ratings are allowed.
@@ -48,7 +49,8 @@ class Search {
       if (trials.size() >= kMostRatings) throw OutOfRatings();
       place = trials.insert(place, {snapped, rate_(snapped)});
     }
-    return place->met() ? std::max(place->margin_min(), kJustMet_min) : place->margin_min();
+    return place->met() ? std::max(place->margin_min(), kJustMet_min)
+                        : std::min(place->margin_min(), -kJustMet_min);
   }
 
   void close_in(double at_low, double at_high) {

@@ -2,7 +2,7 @@
 # Time a layout of `ringward compare` against single runs of `ringward rate`, in one run on one
 # machine: invented round columns that differ in bars, cover, load and strength.
 #   tests/bench/compare_speed.sh BINARY [LAYOUTS]
-# The machine should have nothing else to do. Prints seconds, ratios and the largest memory.
+# The machine should have nothing else to do. Prints times and ratios.
 set -euo pipefail
 binary="$(realpath -- "$1")"
 count="${2:-1000}"
@@ -23,25 +23,28 @@ awk -v count="$count" '
   }' >columns.csv
 printf 'title = "Speed (invented)"\nbase = "column.toml"\ncolumns_csv = "columns.csv"\n' >study.toml
 
-now() { date +%s.%N; }
-study() { # study THREADS: seconds
-  local start
-  start="$(now)"
-  "$binary" compare study.toml -o "out$1" --jobs "$1" --quiet
-  awk -v a="$start" -v b="$(now)" 'BEGIN { print b - a }'
-}
+TIMEFORMAT='%R %U %S' # seconds: wall clock, user, system
 
-start="$(now)"
-tail -n +2 columns.csv | while IFS=, read -r _ bar axis load strength; do
-  "$binary" rate column.toml --quiet --set "bars[0].diameter_mm=$bar" --set "bars[0].axis_mm=$axis" \
-    --set "load.axial_kN=$load" --set "core.strength_MPa=$strength" || [[ $? -eq 1 ]]
-done
-single="$(awk -v a="$start" -v b="$(now)" 'BEGIN { print b - a }')"
-one="$(study 1)"
-two="$(study 2)"
+singles() {
+  tail -n +2 columns.csv | while IFS=, read -r _ bar axis load strength; do
+    "$binary" rate column.toml --quiet --set "bars[0].diameter_mm=$bar" \
+      --set "bars[0].axis_mm=$axis" --set "load.axial_kN=$load" \
+      --set "core.strength_MPa=$strength" || [[ $? -eq 1 ]]
+  done
+}
+study() { "$binary" compare study.toml -o "out$1" --jobs "$1" --quiet; }
+
+{ time singles; } 2>single
+{ time study 1; } 2>one
+{ time study 2; } 2>two
 cmp out1/results.jsonl out2/results.jsonl
-awk -v n="$count" -v s="$single" -v one="$one" -v two="$two" 'BEGIN {
-  printf "%d layouts: single runs %.1f s, compare on 1 thread %.1f s, on 2 threads %.1f s\n", n, s, one, two
-  printf "a layout: %.1f ms, %.1f ms, %.1f ms\n", 1000 * s / n, 1000 * one / n, 1000 * two / n
-  printf "compare is %.2f times faster a layout on 1 thread, %.2f on 2; 2 threads are %.2f times 1\n", s / one, s / two, one / two
-}'
+cat single one two | awk -v n="$count" '
+  { wall[NR] = 1000 * $1 / n; cpu[NR] = 1000 * ($2 + $3) / n }
+  END {
+    printf "%d layouts, ms a layout:     wall clock   processor\n", n
+    printf "  rate, one by one        %10.1f  %10.1f\n", wall[1], cpu[1]
+    printf "  compare, one thread     %10.1f  %10.1f\n", wall[2], cpu[2]
+    printf "  compare, two threads    %10.1f  %10.1f\n", wall[3], cpu[3]
+    printf "compare is %.2f times faster a layout on one thread, %.2f on two\n", wall[1] / wall[2], wall[1] / wall[3]
+    printf "two threads are %.2f times one\n", wall[2] / wall[3]
+  }'

@@ -135,6 +135,14 @@ TEST_CASE("A column that survives counts as longer than what was followed", "[st
   CHECK(result.contradictions.empty());
 }
 
+TEST_CASE("A miss that rounds to zero is a miss all the same", "[study]") {
+  const SizeResult result =
+      found({0, 60, 1}, [](double value) { return value < 30 ? 60.0999 : 60.2; });
+  REQUIRE(result.chosen);
+  CHECK(result.trials[*result.chosen].value == 30);
+  CHECK(result.trials[*result.next].value == 29);
+}
+
 TEST_CASE("With a step too fine for 15 ratings the safe side of what was rated comes out",
           "[study]") {
   const SizeResult result =

@@ -1,5 +1,7 @@
 #include "cli/dossier/dossier_data.hpp"
 
+#include <tbb/parallel_for.h>
+
 #include <algorithm>
 #include <cmath>
 #include <memory>
@@ -79,14 +81,17 @@ std::vector<Axis> axes_of(const ColumnInput& input) {
 
 std::vector<mechanical::InteractionDiagram> diagrams_of(
     const ColumnInput& input, const thermal::TemperatureHistory& history) {
-  std::vector<mechanical::InteractionDiagram> diagrams;
+  std::vector<std::pair<Axis, double>> wanted;
   for (const Axis axis : axes_of(input)) {
     for (const double time_min : kDiagramTimes_min) {
       const double time_s = units::s_from_min(time_min);
-      if (time_s > history.end_s()) continue;
-      diagrams.push_back(mechanical::interaction(input.column, history, time_s, axis));
+      if (time_s <= history.end_s()) wanted.emplace_back(axis, time_s);
     }
   }
+  std::vector<mechanical::InteractionDiagram> diagrams(wanted.size());
+  tbb::parallel_for(std::size_t{0}, wanted.size(), [&](std::size_t i) {
+    diagrams[i] = mechanical::interaction(input.column, history, wanted[i].second, wanted[i].first);
+  });
   return diagrams;
 }
 

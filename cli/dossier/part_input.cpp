@@ -67,11 +67,11 @@ void write_input(DossierWriter& writer) {
       "Every value that the calculation used. \"Given\" stands in the input file or on the command "
       "line; all else is a default of the program. The source is that of the default or of the law "
       "that takes the value; a key in it is resolved in the list of sources.");
-  HtmlTable table(writer.table_caption("Input"), {{.name = "Key", .share_percent = 24},
-                                                  {.name = "Value", .share_percent = 13},
-                                                  {.name = "Origin", .share_percent = 9},
-                                                  {.name = "Meaning", .share_percent = 36},
-                                                  {.name = "Source", .share_percent = 18}});
+  HtmlTable table(writer.table_caption("Input"), {{.name = "Key", .share_percent = 25},
+                                                  {.name = "Value", .share_percent = 14},
+                                                  {.name = "Origin", .share_percent = 11},
+                                                  {.name = "Meaning", .share_percent = 31},
+                                                  {.name = "Source", .share_percent = 19}});
   for (const EchoEntry& entry : writer.data.report.input.echo) {
     if (!is_listed(entry)) continue;
     const std::vector<std::string> row = row_of(entry);

@@ -94,28 +94,48 @@ bool is_inside(const thermal::Section& section, double x_m, double y_m) {
   return std::abs(x_m) < outline.width_m / 2 && std::abs(y_m) < outline.depth_m / 2;
 }
 
+/// A label with its place.
+struct IsothermLabel {
+  PicturePoint at;
+  std::string text;
+};
+
 // Along one ray from the centre, at every crossing of a band's limit that is not too close to the
 // last.
-std::string isotherm_labels(const MapSubject& subject, const Drawing& drawing, double time_s) {
+std::vector<IsothermLabel> labels_along(double ray_rad, const MapSubject& subject,
+                                        const Drawing& drawing, double time_s) {
   const double step_m = 0.5 / drawing.px_per_m;
-  const double dx = std::cos(kLabelRay_rad);
-  const double dy = std::sin(kLabelRay_rad);
+  const double dx = std::cos(ray_rad);
+  const double dy = std::sin(ray_rad);
   int band = drawing.bands.band_of(subject.history->T_C({0, 0}, time_s));
   double last_px = -kLabelDistance_px;
-  std::string labels;
+  std::vector<IsothermLabel> labels;
   for (double r = step_m; is_inside(*subject.section, (r + step_m) * dx, (r + step_m) * dy);
        r += step_m) {
     const int here = drawing.bands.band_of(subject.history->T_C({r * dx, r * dy}, time_s));
     if (here == band) continue;
     const double r_px = r * drawing.px_per_m;
     if (r_px - last_px >= kLabelDistance_px) {
-      labels += svg_label({r_px * dx, -r_px * dy + 3.5},
-                          shortest(drawing.bands.lower_C(std::max(band, here))));
+      labels.push_back(
+          {{r_px * dx, -r_px * dy + 3.5}, shortest(drawing.bands.lower_C(std::max(band, here)))});
       last_px = r_px;
     }
     band = here;
   }
   return labels;
+}
+
+// Along the ray that crosses the most isotherms: towards a face that sees the fire.
+std::string isotherm_labels(const MapSubject& subject, const Drawing& drawing, double time_s) {
+  std::vector<IsothermLabel> most;
+  for (const double ray_rad : {kLabelRay_rad, units::kPi - kLabelRay_rad, -kLabelRay_rad,
+                               units::kPi / 2 - kLabelRay_rad, units::kPi / 2 + kLabelRay_rad}) {
+    std::vector<IsothermLabel> labels = labels_along(ray_rad, subject, drawing, time_s);
+    if (labels.size() > most.size()) most = std::move(labels);
+  }
+  std::string drawn;
+  for (const IsothermLabel& label : most) drawn += svg_label(label.at, label.text);
+  return drawn;
 }
 
 std::string at(double x, double y, const std::string& content) {

@@ -30,7 +30,8 @@ pre {
 .wide { overflow-x: auto; margin: 1rem 0 1.3rem; }
 .wide:focus-visible, input:focus-visible, a:focus-visible { outline: 3px solid #003f7f; outline-offset: 2px; }
 table { border-collapse: collapse; width: 100%; font-size: 0.84rem; line-height: 1.35; }
-table.shared { table-layout: fixed; min-width: 36rem; overflow-wrap: anywhere; }
+table.shared { table-layout: fixed; min-width: 40rem; overflow-wrap: anywhere; }
+.shared th, .shared td { padding-left: 0.3rem; padding-right: 0.3rem; }
 caption { text-align: left; font-weight: bold; padding: 0 0 0.4rem; }
 th, td { padding: 0.28rem 0.6rem; text-align: left; vertical-align: top; border-bottom: 1px solid #c9c9c9; }
 thead th { border-bottom: 1.5px solid #1a1a1a; vertical-align: bottom; }

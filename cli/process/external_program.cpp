@@ -39,6 +39,8 @@ Owned<GSubprocess> started(const ProgramCall& call, GError** failure) {
       static_cast<GSubprocessFlags>(G_SUBPROCESS_FLAGS_STDIN_PIPE | G_SUBPROCESS_FLAGS_STDOUT_PIPE |
                                     G_SUBPROCESS_FLAGS_STDERR_PIPE)));
   g_subprocess_launcher_setenv(launcher.get(), "LC_ALL", "C", TRUE);
+  // Programs that know it write this time in place of the present one.
+  g_subprocess_launcher_setenv(launcher.get(), "SOURCE_DATE_EPOCH", "0", TRUE);
   return Owned<GSubprocess>(g_subprocess_launcher_spawnv(launcher.get(), words.data(), failure));
 }
 

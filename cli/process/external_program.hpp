@@ -26,7 +26,8 @@ struct ProgramRun {
   }
 };
 
-/// Runs the program without a shell, in the locale "C", and waits for its end.
+/// Runs the program without a shell, in the locale "C" and with SOURCE_DATE_EPOCH set, so that its
+/// output does not depend on place and time, and waits for its end.
 [[nodiscard]] ProgramRun run_external(const ProgramCall& call);
 
 }  // namespace ringward::cli

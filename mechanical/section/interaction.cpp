@@ -15,6 +15,7 @@ constexpr double kFirstCurvature = 2e-5;  // times 1 / extent: far below any yie
 constexpr double kLastCurvature = 0.12;
 constexpr double kCurvatureGrowth = 1.12;
 constexpr double kForceTolerance = 1e-9;  // of the plastic resistance
+constexpr double kNoMomentAcross = 1e-5;  // of the plastic resistance times the extent
 
 /// Maximum of a function by golden section; the bracket must hold one maximum.
 template <class Function>
@@ -23,7 +24,8 @@ double argmax(Function f, double low, double high) {
   for (int k = 0; k < 40; ++k) {
     const double left = high - kGolden * (high - low);
     const double right = low + kGolden * (high - low);
-    (f(left) > f(right) ? high : low) = f(left) > f(right) ? right : left;
+    const bool left_is_higher = f(left) > f(right);
+    (left_is_higher ? high : low) = left_is_higher ? right : left;
   }
   return 0.5 * (low + high);
 }
@@ -41,10 +43,11 @@ class DiagramBuilder {
       const double share = 0.5 * (1.0 - std::cos(units::kPi * k / kForceLevels));
       const double N = tension_N + share * (top_.axial_N - tension_N);
       if (k == kForceLevels) continue;
-      positive.push_back({N, extreme_moment(N, 1.0)});
-      negative.push_back({N, extreme_moment(N, -1.0)});
+      add_extreme(positive, N, 1.0);
+      add_extreme(negative, N, -1.0);
     }
-    std::vector<InteractionPoint> points{top_};
+    std::vector<InteractionPoint> points;
+    if (top_has_no_moment_across_) points.push_back(top_);
     points.insert(points.end(), positive.begin(), positive.end());
     points.push_back({tension_N, tension_moment()});
     points.insert(points.end(), negative.rbegin(), negative.rend());
@@ -52,14 +55,25 @@ class DiagramBuilder {
   }
 
  private:
+  // Near the largest force there may be no equilibrium without a moment across the axis.
+  void add_extreme(std::vector<InteractionPoint>& points, double N, double sign) const {
+    const std::optional<double> moment = extreme_moment(N, sign);
+    if (moment) points.push_back({N, *moment});
+  }
+
   [[nodiscard]] double peak_strain(double kappa) const {
     const auto force = [&](double eps0) { return section_.response({eps0, kappa, 0}).N_N; };
     const double from = section_.least_strain() - 0.005;
     constexpr int kCount = 120;
     const double step = (0.03 - from) / kCount;
     double best = from;
+    double best_N = force(from);
     for (int k = 1; k <= kCount; ++k) {
-      if (force(from + k * step) > force(best)) best = from + k * step;
+      const double N = force(from + k * step);
+      if (N > best_N) {
+        best_N = N;
+        best = from + k * step;
+      }
     }
     return argmax(force, best - step, best + step);
   }
@@ -75,19 +89,22 @@ class DiagramBuilder {
     top_strain_ = peak_strain(top_kappa_);
     const SectionResponse top = section_.response({top_strain_, top_kappa_, 0});
     top_ = {top.N_N, top.M_u_Nm};
+    const double across = std::abs(top.M_v_Nm) / section_.extent_m();
+    top_has_no_moment_across_ = across < kNoMomentAcross * section_.plastic_N();
   }
 
   [[nodiscard]] double tension_moment() const {
     return section_.response({-0.03 + section_.least_strain(), 0, 0}).M_u_Nm;
   }
 
-  /// eps0 on the rising branch for a force: bisection below the strain of the largest force.
-  [[nodiscard]] double first_strain(double N, double kappa) const {
+  /// eps0 on the rising branch for a force, at the curvature of the largest force: bisection below
+  /// the strain of the largest force.
+  [[nodiscard]] double first_strain(double N) const {
     double low = -0.03 + section_.least_strain();
-    double high = peak_strain(kappa);
+    double high = top_strain_;
     for (int k = 0; k < 60; ++k) {
       const double middle = 0.5 * (low + high);
-      (section_.response({middle, kappa, 0}).N_N < N ? low : high) = middle;
+      (section_.response({middle, top_kappa_, 0}).N_N < N ? low : high) = middle;
     }
     return 0.5 * (low + high);
   }
@@ -115,10 +132,11 @@ class DiagramBuilder {
     return std::nullopt;
   }
 
-  /// The largest moment (of the sign) at a force, over all curvatures that can be reached.
-  [[nodiscard]] double extreme_moment(double N, double sign) const {
-    StrainPlane plane{first_strain(N, top_kappa_), top_kappa_, 0.0};
-    double best = -1e300;
+  /// The largest moment (of the sign) at a force, over all curvatures that can be reached; none
+  /// where no equilibrium is found.
+  [[nodiscard]] std::optional<double> extreme_moment(double N, double sign) const {
+    StrainPlane plane{first_strain(N), top_kappa_, 0.0};
+    std::optional<double> best;
     if (const std::optional<StrainPlane> start = balance(plane, N)) {
       plane = *start;
       best = sign * section_.response(plane).M_u_Nm;
@@ -130,16 +148,18 @@ class DiagramBuilder {
       if (!next) break;
       plane = *next;
       const double moment = sign * section_.response(plane).M_u_Nm;
-      best = std::max(best, moment);
-      if (moment < 0.7 * best && best > 0.0) break;
+      best = best ? std::max(*best, moment) : moment;
+      if (moment<0.7 * *best&& * best> 0.0) break;
     }
-    return sign * best;
+    if (!best) return std::nullopt;
+    return sign * *best;
   }
 
   const HotSection& section_;
   InteractionPoint top_;
   double top_kappa_ = 0;
   double top_strain_ = 0;
+  bool top_has_no_moment_across_ = true;
 };
 
 }  // namespace

@@ -1,8 +1,11 @@
 #include <catch2/catch.hpp>
+#include <chrono>
 #include <cmath>
 #include <cstdio>
 #include <nlohmann/json.hpp>
+#include <thread>
 
+#include "cli/dossier/pdf.hpp"
 #include "tests/cli/commands/run_process.hpp"
 #include "tests/cli/dossier/dossier_columns.hpp"
 #include "tests/cli/page/xml_check.hpp"
@@ -43,6 +46,12 @@ TEST_CASE("The PDF opens, has text, page numbers and bookmarks, and holds rate's
     CHECK(text.find(shown) != std::string::npos);
   }
 
+  SECTION("The same input gives the same bytes, also a second later") {
+    std::this_thread::sleep_for(std::chrono::milliseconds(1100));
+    write_content(folder / "again.pdf", ringward::cli::pdf_of(file_content(folder / "c.html")));
+    const bool same = file_content(folder / "again.pdf") == file_content(folder / "c.pdf");
+    CHECK(same);  // not printed: the files are long
+  }
   const std::string information = output_of({"pdfinfo", folder / "c.pdf"});
   CHECK(information.find("A4") != std::string::npos);
   const std::size_t at = information.find("Pages:");

@@ -46,10 +46,11 @@ bool has_diagrams(const DossierData& data, Axis axis) {
 void write_capacity(DossierWriter& writer) {
   const DossierData& data = writer.data;
   writer.part("Capacity");
+  const std::string range =
+      data.other_models.empty() ? "" : " The shaded range lies between the confinement models.";
   writer.page.figure(
       capacity_chart(data),
-      writer.figure_caption("Capacity of the member against time, with the load. The shaded range "
-                            "lies between the confinement models where a tube confines."));
+      writer.figure_caption("Capacity of the member against time, with the load." + range));
   write_states(writer);
   for (const Axis axis : {Axis::x, Axis::y}) {
     if (!has_diagrams(data, axis)) continue;

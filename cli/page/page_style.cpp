@@ -45,8 +45,8 @@ figcaption { font-size: 0.86rem; padding-top: 0.4rem; color: #333; }
 .boxed { border: 2px solid #1a1a1a; padding: 0.7rem 1rem; margin: 1rem 0 1.2rem; }
 .boxed p { margin: 0.25rem 0; }
 table.pairs { margin: 0.8rem 0 1.1rem; font-size: 0.9rem; }
-.pairs th { width: 28%; color: #4a4a4a; }
 .pairs th, .pairs td { border-bottom: 1px solid #e3e3e3; padding-left: 0; overflow-wrap: anywhere; }
+.pairs th { width: 28%; color: #4a4a4a; overflow-wrap: normal; }
 ol.contents { list-style: none; padding-left: 0; columns: 2; column-gap: 2rem; font-size: 0.9rem; }
 .checklist { list-style: none; padding-left: 0; }
 .checklist li { padding-left: 1.7rem; text-indent: -1.7rem; }

@@ -14,10 +14,10 @@ build_packages=(
 )
 # What the program runs for pictures and for PDF; without it results are complete but have none.
 recommended_packages=(gnuplot-nox weasyprint)
-# What only the tests use: the test framework, readers of XML and PDF to check files with, a
+# What only the tests use: the test framework, readers of XML, HTML and PDF to check files with, a
 # numerical library for an independent solution, and a browser to look at pages.
 test_packages=(
-  catch2 libxml2-utils poppler-utils qpdf python3-scipy
+  catch2 libxml2-utils tidy poppler-utils qpdf python3-scipy
   chromium chromium-driver
 )
 

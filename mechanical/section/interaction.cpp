@@ -149,7 +149,8 @@ class DiagramBuilder {
       plane = *next;
       const double moment = sign * section_.response(plane).M_u_Nm;
       best = best ? std::max(*best, moment) : moment;
-      if (moment<0.7 * *best&& * best> 0.0) break;
+      const bool is_past_the_peak = best.value() > 0.0 && moment < 0.7 * best.value();
+      if (is_past_the_peak) break;
     }
     if (!best) return std::nullopt;
     return sign * *best;

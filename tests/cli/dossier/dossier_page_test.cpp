@@ -101,6 +101,7 @@ TEST_CASE("A dossier is one well-formed page with its parts in order and rate's 
   const std::string html = file_content(folder / "c7.html");
   const ordered_json rate = ordered_json::parse(file_content(folder / "rate.json"));
   CHECK(xml_complaints(html).empty());
+  CHECK(html_complaints(html) == "");
   check_headings(html);
   check_nothing_outside(html);
   check_pictures(html, 8);
@@ -180,6 +181,7 @@ TEST_CASE("Text of an input stays text in the dossier, whatever it holds", "[dos
   REQUIRE(result.exit_code <= 1);
   const std::string html = file_content(folder / "page.html");
   CHECK(xml_complaints(html).empty());
+  CHECK(html_complaints(html) == "");
   // Two scripts of our own: the frames of the map, and what moves it.
   CHECK(occurrences(html, "<script") == 2);
   CHECK(attribute_values(html, "onload").empty());
@@ -198,6 +200,7 @@ TEST_CASE("A column that survives, without tube, and without gnuplot, has a doss
   CHECK(result.exit_code == 0);
   const std::string html = file_content(folder / "page.html");
   CHECK(xml_complaints(html).empty());
+  CHECK(html_complaints(html) == "");
   CHECK(html.find("above 30.0 min") != std::string::npos);
   CHECK(html.find("gnuplot-nox") != std::string::npos);
   CHECK(html.find("The column has no tube.") != std::string::npos);

@@ -6,6 +6,7 @@
 #include "cli/input/reader.hpp"
 #include "mechanical/rating/rating.hpp"
 #include "tests/cli/dossier/dossier_columns.hpp"
+#include "tests/support/published_table.hpp"
 #include "thermal/base/piecewise_linear.hpp"
 
 using namespace ringward;
@@ -29,33 +30,24 @@ Checked checked_at(const std::string& text, double time_min) {
 
 double rounded_to(double value, double step) { return std::round(value / step) * step; }
 
+/// Factors of strength against temperature, as a reviewer reads them off a table.
+PiecewiseLinear factors(const std::string& file, const std::string& column) {
+  const PublishedTable table(file);
+  std::vector<PiecewiseLinear::Point> points;
+  for (std::size_t row = 0; row < table.size(); ++row) {
+    points.push_back({table.number(row, "theta_C"), table.number(row, column)});
+  }
+  return PiecewiseLinear(points);
+}
+
 /// The table redone as a reviewer does: printed areas and mean temperatures, factors read off.
+/// EN 1992-1-2:2004 Tables 3.1 and 3.2a, EN 1993-1-2:2005 Table 3.1, whose k_y are those of hot
+/// rolled bars; all from memory.
 double redone_N(const HandCheck& check) {
-  // EN 1992-1-2:2004 Table 3.1 (siliceous) and Table 3.2a (class N, hot rolled), EN 1993-1-2:2005
-  // Table 3.1; all from memory.
-  const PiecewiseLinear concrete({{20, 1.0},
-                                  {100, 1.0},
-                                  {200, 0.95},
-                                  {300, 0.85},
-                                  {400, 0.75},
-                                  {500, 0.60},
-                                  {600, 0.45},
-                                  {700, 0.30},
-                                  {800, 0.15},
-                                  {900, 0.08},
-                                  {1000, 0.04},
-                                  {1100, 0.01},
-                                  {1200, 0.0}});
-  const PiecewiseLinear steel({{20, 1.0},
-                               {400, 1.0},
-                               {500, 0.78},
-                               {600, 0.47},
-                               {700, 0.23},
-                               {800, 0.11},
-                               {900, 0.06},
-                               {1000, 0.04},
-                               {1100, 0.02},
-                               {1200, 0.0}});
+  const PiecewiseLinear concrete =
+      factors("EN1992-1-2_2004_T3.1_concrete.csv", "fc_theta/fck_siliceous");
+  const PiecewiseLinear steel =
+      factors("EN1992-1-2_2004_T3.2a_rebar_classN.csv", "fsy/fyk_hot_rolled");
   double sum_N = 0;
   for (const HandCheckRow& row : check.rows) {
     const PiecewiseLinear& table = row.part.rfind("Concrete", 0) == 0 ? concrete : steel;

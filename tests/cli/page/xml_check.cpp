@@ -1,6 +1,7 @@
 #include "tests/cli/page/xml_check.hpp"
 
 #include <regex>
+#include <sstream>
 
 #include "tests/cli/commands/run_process.hpp"
 
@@ -13,6 +14,20 @@ std::string xml_complaints(const std::string& document) {
       run_program({"xmllint", "--noout", "--nonet", folder / "document.xml"});
   if (xmllint.exit_code == 0) return "";
   return xmllint.err.empty() ? "xmllint did not run" : xmllint.err;
+}
+
+std::string html_complaints(const std::string& page) {
+  const TemporaryFolder folder;
+  write_content(folder / "page.html", page);
+  const ProcessResult tidy = run_program({"tidy", "-errors", "-quiet", folder / "page.html"});
+  if (tidy.exit_code > 2) return "tidy did not run";
+  const std::regex of_svg("Warning: <(svg|title)> proprietary attribute");
+  std::istringstream lines(tidy.err);
+  std::string complaints;
+  for (std::string line; std::getline(lines, line);) {
+    if (!std::regex_search(line, of_svg)) complaints += line + "\n";
+  }
+  return complaints;
 }
 
 std::size_t occurrences(const std::string& text, const std::string& part) {

@@ -1,7 +1,7 @@
 #!/usr/bin/env bash
 # Makes docs/validation.md and the pictures in docs/validation/ anew, all of them or none.
 #   bash tests/validation/page.sh [BUILD]             from the stored study of the uncertainty
-#   bash tests/validation/page.sh [BUILD] --studies   runs that study first (half an hour and more)
+#   bash tests/validation/page.sh [BUILD] --studies   runs that study first (some ten minutes)
 # BUILD is a configured build folder below the root of the project (build).
 set -euo pipefail
 
